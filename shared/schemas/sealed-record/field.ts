@@ -5,8 +5,8 @@ import { VERDICTS } from '../../utils/verdict'
 export const moment = z.iso.datetime({ message: 'A moment is a UTC instant such as 2027-03-02T14:05:00Z' })
 /** A SHA-256 in lower-case hexadecimal. */
 export const sha256Hex = z.string().regex(/^[0-9a-f]{64}$/, 'A hash is 64 lower-case hexadecimal digits')
-/** Text that is really there. */
-export const words = z.string().trim().min(1)
+/** Text that is really there; kept exactly as it is, because changing a space would change the hash. */
+export const words = z.string().regex(/\S/, 'There must be something here')
 
 /** What a printed field holds; nothing else exists, so a cell can never be blank. */
 export const FIELD_KINDS = ['value', 'over-range', 'limited', 'not-applicable', 'not-entered'] as const

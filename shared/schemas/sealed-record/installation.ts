@@ -1,5 +1,5 @@
 import * as z from 'zod'
-import { printedField as field } from './field'
+import { printedField as field, words } from './field'
 import { commonParts, designPart, earthingMethodPart } from './parts'
 import { inspectionsPart } from './inspections'
 import { testSchedulePart } from './test-schedule'
@@ -35,7 +35,7 @@ export const installationRecord = z.strictObject({
   kind: z.literal('installation'),
   installation: z.strictObject({
     /** One line for the foot of each page: `19 Hill Street, ZZ1 1ZZ`. */
-    shortAddress: z.string().min(1),
+    shortAddress: words,
     address: field,
     occupier: field,
     description: field,

@@ -1,5 +1,5 @@
 import * as z from 'zod'
-import { printedField as field } from './field'
+import { printedField as field, words } from './field'
 import { commonParts, designPart } from './parts'
 import { devicePart, rcdPart } from './test-schedule'
 
@@ -7,7 +7,7 @@ import { devicePart, rcdPart } from './test-schedule'
 export const minorWorksRecord = z.strictObject({
   ...commonParts,
   kind: z.literal('minor-works'),
-  installation: z.strictObject({ shortAddress: z.string().min(1), address: field }),
+  installation: z.strictObject({ shortAddress: words, address: field }),
   work: z.strictObject({ completed: field, description: field, location: field }),
   existingInstallation: z.strictObject({ comments: field }),
   /** The calculations behind the work, where it needed any. */

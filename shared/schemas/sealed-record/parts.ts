@@ -38,7 +38,7 @@ export const signature = z.strictObject({
   way: z.enum(SIGNING_WAYS),
   statement: words,
   /** Strokes as the `d` of one SVG path, in a box of the stated size: letters, digits and separators only, so that nothing else can ride on it. */
-  drawing: z.strictObject({ width: z.number().positive(), height: z.number().positive(), path: z.string().regex(/^[MLCQHVZmlcqhvz0-9 .,-]+$/) }).optional(),
+  drawing: z.strictObject({ width: z.number().positive(), height: z.number().positive(), path: z.string().regex(/^[MLCQHVSTZmlcqhvstz0-9 .,-]+$/) }).optional(),
 })
 export type Signature = z.infer<typeof signature>
 
