@@ -33,11 +33,15 @@ function take(path) {
   return false
 }
 
-/** Does the work while no other script of this checkout does work under the same name. */
-export async function alone(name, work) {
+/**
+ * Does the work while no other script of this checkout does work under the same name.
+ * Another one's work is waited for, as long as `patienceMs` allows.
+ */
+export async function alone(name, work, { patienceMs = 300_000 } = {}) {
   const path = inData(`${name}.lock`)
-  for (let tries = 0; !take(path); tries++) {
-    if (tries > 1200) throw new Mendable(`Another run holds ${path}`, 'wait for it to end, or delete that file if nothing runs')
+  const until = Date.now() + patienceMs
+  while (!take(path) && !take(path)) {
+    if (Date.now() >= until) throw new Mendable(`Another run holds ${path}`, 'wait for it to end, or delete that file if nothing runs')
     await pause(250)
   }
   try {

@@ -14,10 +14,13 @@ export function runQuietly(command, args, options = {}) {
   return { status: done.status ?? 1, out: done.stdout ?? '', err: done.stderr ?? '' }
 }
 
-/** Runs a program to its end without blocking signals; answers its status and all that it printed, in order. */
+/**
+ * Runs a program to its end without blocking signals; answers its status and all that it printed, in order.
+ * It leads a process group of its own, so that `onStart` can hand it to whoever stops things.
+ */
 export function runToEnd(command, args, { onStart, ...options } = {}) {
   return new Promise((resolve) => {
-    const child = spawn(command, args, { stdio: ['ignore', 'pipe', 'pipe'], ...options })
+    const child = spawn(command, args, { stdio: ['ignore', 'pipe', 'pipe'], detached: Boolean(onStart), ...options })
     onStart?.(child)
     let output = ''
     const keep = (chunk) => {
