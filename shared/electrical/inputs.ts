@@ -18,10 +18,9 @@ export const oneOf = <const Words extends readonly [string, ...string[]]>(what: 
   z.enum(words, `Give ${what} as one of: ${words.join(', ')}.`).optional()
 
 export const phases = z.literal([1, 3], 'Give the phases as 1 or 3.').optional()
-export const powerFactor = above('the power factor').check(z.lte(1, 'A power factor is at most 1.'))
+export const powerFactor = z.number('Give the power factor as a number.').positive('Give the power factor as a number above zero.').max(1, 'A power factor is at most 1.').optional()
 export const factorGiven = (symbol: string) => above(`the factor ${symbol}`)
-/** A share of a voltage or of an energy, above zero and at most one. */
-export const efficiency = above('the efficiency').check(z.lte(1, 'An efficiency is at most 1 (90 % is 0.9).'))
+export const efficiency = z.number('Give the efficiency as a number.').positive('Give the efficiency as a number above zero.').max(1, 'An efficiency is at most 1 (90 % is 0.9).').optional()
 export const size_mm2 = above('the size')
 export const clockTime = (what: string) => z.string(`Give ${what} as a time such as 16:00.`).regex(/^([01]\d|2[0-3]):[0-5]\d$/, `Give ${what} as a time such as 16:00.`)
 
