@@ -1,4 +1,6 @@
 import { spawn, spawnSync } from 'node:child_process'
+import { existsSync } from 'node:fs'
+import { delimiter, join } from 'node:path'
 import { Mendable } from './say.mjs'
 
 /** True when this process runs as root. */
@@ -38,4 +40,9 @@ export async function mustRun(what, mend, command, args, options) {
   const { status, output } = await runToEnd(command, args, options)
   if (status !== 0) throw new Mendable(`${what} ended with status ${status}`, mend, output)
   return output
+}
+
+/** True when a program of this name is on PATH. */
+export function isThere(program) {
+  return (process.env.PATH ?? '').split(delimiter).some(folder => folder && existsSync(join(folder, program)))
 }

@@ -63,7 +63,7 @@ export function appEnv({ base, host, ports, fakes, filesDir }) {
   if (fakes.stripe) Object.assign(env, { STRIPE_HOST: '127.0.0.1', STRIPE_PORT: String(ports.stripe), STRIPE_PROTOCOL: 'http' })
   mkdirSync(env.COPPERPLATE_FILES_DIR, { recursive: true, mode: 0o700 })
   // A secure cookie never comes back over plain http; the session module has a setting of its own for it.
-  if (env.COPPERPLATE_BASE_URL.startsWith('http:')) env.NUXT_SESSION_COOKIE_SECURE = 'false'
+  if (env.COPPERPLATE_BASE_URL.startsWith('http:')) Object.assign(env, { NUXT_SESSION_COOKIE_SECURE: 'false', NUXT_SESSION_NAME: 'copperplate' })
   return env
 }
 
