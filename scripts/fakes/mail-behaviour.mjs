@@ -5,7 +5,7 @@ export function createBehaviour() {
   let rules = []
   return {
     modes: MODES,
-    /** Adds a rule; for one recipient when named, else for all; for `count` messages when given, else until `accept`. */
+    /** Adds a rule; for one recipient when named, else for all; for `count` messages when given, else until `accept`. @param {{ mode: string, recipient?: string, count?: number }} rule */
     set({ mode, recipient, count }) {
       if (!MODES.includes(mode)) throw new RangeError(`mode is one of ${MODES.join(', ')}`)
       rules = rules.filter(rule => rule.recipient !== recipient)

@@ -1,4 +1,4 @@
-/** Reads a form body with nested names, `line_items[0][price_data][currency]=gbp`, into objects. */
+/** Reads a form body with nested names, `line_items[0][price_data][currency]=gbp`, into objects. @returns {Record<string, any>} */
 export function parseForm(body) {
   const tree = {}
   for (const [name, value] of new URLSearchParams(body)) {

@@ -7,7 +7,7 @@ export function countVitest(report) {
   return counted(report.numPassedTests, report.numFailedTests + unloadable, report.numPendingTests + (report.numTodoTests ?? 0))
 }
 
-/** From Playwright's JSON report; an error outside any test counts as one failure. */
+/** From Playwright's JSON report; an error outside any test counts as one failure. @param {{ stats: Record<string, number>, errors?: unknown[] }} report */
 export function countPlaywright({ stats, errors = [] }) {
   return counted(stats.expected + stats.flaky, stats.unexpected + errors.length, stats.skipped)
 }
