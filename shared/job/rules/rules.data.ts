@@ -242,7 +242,7 @@ export const RULES: readonly Rule[] = [
     alsoSeenIn: [
       { title: 'Guide to the Wiring Regulations: 17th Edition, table E 4.6', publisher: 'Wiley', edition: '2008, ISBN 978-0-470-51685-0', url: null },
     ],
-    note: 'BS 7671 Table 54.8 (tables.json 54.8).',
+    note: 'BS 7671 Table 54.8 (table 54.8 of this program).',
   },
   {
     id: 'SUR-15',
@@ -740,7 +740,7 @@ export const RULES: readonly Rule[] = [
     topic: 'method ii electrode',
     stage: 'design',
     jurisdiction: 'UK',
-    statement: '(ii) Main earthing terminal joined to an electrode low enough that the open-PEN voltage to Earth stays at or below 70 V r.m.s. Annex form (tables.json, 722): RA <= 70 U0 / (I (Cmax U0 - 70)), Cmax 1.1. At 230 V: 60 A gives 1.47 ohm; 32 A gives 2.75 ohm: seldom attainable.',
+    statement: '(ii) Main earthing terminal joined to an electrode low enough that the open-PEN voltage to Earth stays at or below 70 V r.m.s. Annex form (table 722 of this program): RA <= 70 U0 / (I (Cmax U0 - 70)), Cmax 1.1. At 230 V: 60 A gives 1.47 ohm; 32 A gives 2.75 ohm: seldom attainable.',
     figures: [
       { name: 'touch', op: '<=', value: 70, unit: 'V' },
       { name: 'R at 60 A', op: '<=', value: 1.47, unit: 'ohm' },
@@ -1135,7 +1135,7 @@ export const RULES: readonly Rule[] = [
     since: null,
     until: null,
     alsoSeenIn: [
-      { title: 'Voltage drop limits (tables.json, vd-limits)', publisher: 'exam course', edition: 'web page', url: null },
+      { title: 'Voltage drop limits (table vd-limits of this program)', publisher: 'exam course', edition: 'web page', url: null },
     ],
   },
   {
