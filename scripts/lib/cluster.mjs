@@ -20,7 +20,7 @@ const keysFile = () => join(clusterHome(), 'keys.json')
 /** Runs a PostgreSQL program under the account that owns the cluster. */
 function asServer(program, args) {
   const options = { cwd: '/', stdio: ['ignore', 'pipe', 'pipe'] }
-  return isRoot() ? runQuietly('runuser', ['-u', 'postgres', '--', program, ...args], options) : runQuietly(program, args, options)
+  return isRoot() ? runQuietly(existsSync('/usr/sbin/runuser') ? '/usr/sbin/runuser' : 'runuser', ['-u', 'postgres', '--', program, ...args], options) : runQuietly(program, args, options)
 }
 
 function giveToServer(path, mode) {

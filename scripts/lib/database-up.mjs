@@ -17,7 +17,7 @@ export function namedServer(env) {
   const given = NAMES.filter(name => env[name])
   if (given.length === 0) return null
   const missing = NAMES.filter(name => !env[name])
-  if (missing.length > 0) throw new Mendable(`${given.join(' and ')} is set but ${missing.join(' and ')} is not`, 'set all three to use a server of your own, or none to let this script run one')
+  if (missing.length > 0) throw new Mendable(`${given.join(' and ')} is set but not ${missing.join(' and ')}`, 'set all three to use a server of your own, or none to let this script run one')
   return Object.fromEntries(NAMES.map(name => [name, env[name]]))
 }
 

@@ -42,6 +42,6 @@ describe('database addresses', () => {
     const all = { DATABASE_URL: 'a', DATABASE_URL_WORKER: 'b', DATABASE_URL_OWNER: 'c' }
     expect(namedServer({})).toBeNull()
     expect(namedServer({ ...all, PORT: '1' })).toEqual(all)
-    expect(() => namedServer({ DATABASE_URL_OWNER: 'c' })).toThrow('DATABASE_URL_OWNER is set but DATABASE_URL and DATABASE_URL_WORKER is not')
+    expect(() => namedServer({ DATABASE_URL_OWNER: 'c' })).toThrow('DATABASE_URL_OWNER is set but not DATABASE_URL and DATABASE_URL_WORKER')
   })
 })
