@@ -1,5 +1,5 @@
 /** Every calculation by the name it is asked for: the one list behind the command line, the API route and the pages. */
-import type { ErasedCalculation } from '../utils/calculation'
+import { electricalCalculations } from '../electrical/registry'
 import { certificateKindCalculation } from '../job/rules/certificate-kind'
 import { deadlinesCalculation } from '../job/rules/deadlines'
 import { earthingMethodCalculation } from '../job/rules/earthing-method'
@@ -10,18 +10,22 @@ import { smartWindowCalculation } from '../job/rules/smart-window'
 import { cancellationCalculation } from '../pricing/cancellation'
 import { grantCalculation } from '../pricing/grant'
 import { invoiceCalculation } from '../pricing/invoice'
+import type { ErasedCalculation } from '../utils/calculation'
 
-export const jobCalculations = {
-  'mpan': mpanCalculation,
-  'network-route': networkRouteCalculation,
-  'deadlines': deadlinesCalculation,
-  'smart-window': smartWindowCalculation,
-  'certificate-kind': certificateKindCalculation,
-  'grant': grantCalculation,
-  'invoice': invoiceCalculation,
-  'cancellation': cancellationCalculation,
-  'mounting': mountingCalculation,
-  'earthing-method': earthingMethodCalculation,
-} as unknown as Record<string, ErasedCalculation>
+const jobCalculations: readonly ErasedCalculation[] = [
+  mpanCalculation,
+  networkRouteCalculation,
+  deadlinesCalculation,
+  smartWindowCalculation,
+  certificateKindCalculation,
+  grantCalculation,
+  invoiceCalculation,
+  cancellationCalculation,
+  mountingCalculation,
+  earthingMethodCalculation,
+]
 
-export const calculations: Record<string, ErasedCalculation> = { ...jobCalculations }
+export const calculations: Readonly<Record<string, ErasedCalculation>> = {
+  ...electricalCalculations,
+  ...Object.fromEntries(jobCalculations.map(each => [each.name, each])),
+}

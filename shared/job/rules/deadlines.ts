@@ -6,7 +6,7 @@
  * @source rules DNO-02, DOC-10 to DOC-14, PPL-01
  * @example completed 2026-12-01 in England -> network operator by 2026-12-29, building control by 2026-12-31
  */
-import * as z from 'zod'
+import type * as z from 'zod'
 import { fields } from '../../electrical/inputs'
 import { answer, waiting, type Answer, type WorkingStep } from '../../utils/answer'
 import { defineCalculation } from '../../utils/calculation'
@@ -40,9 +40,10 @@ export interface DeadlinesResult {
 
 export function deadlines(given: DeadlinesInput): Answer<DeadlinesResult> {
   const { completed, supervisorLeft, country: where, schemeMember } = given
-  if (!completed && !supervisorLeft) return waiting(['completed', ...blankKeys({ country: where, schemeMember })])
-  const blank = completed ? blankKeys({ country: where, schemeMember }) : []
-  if (blank.length) return waiting(blank)
+  const asksForScheme = where !== 'Scotland' && where !== 'Northern Ireland'
+  const blank = blankKeys({ country: where, ...(asksForScheme && { schemeMember }) })
+  if (!completed && !supervisorLeft) return waiting(['completed', ...blank])
+  if (completed && blank.length) return waiting(blank)
 
   const isNotifiable = (where === 'England' || where === 'Wales') && schemeMember === true
   const later = (from: Day | null | undefined, days: number) => (from ? addDays(from, days) : null)

@@ -6,7 +6,7 @@
  *
  * @source rules DNO-13 and DNO-15; that all generation counts towards the 16 A is from memory
  */
-import { formatAmps, formatKilowatts } from '../../utils/figures'
+import { formatBesideLimit, formatFigure, formatKilowatts } from '../../utils/figures'
 import type { NetworkRouteInput } from './network-route'
 import { because } from './rule'
 
@@ -33,9 +33,9 @@ export function generationForm(given: NetworkRouteInput): NetworkForm | null {
 
 export function exportReason(given: NetworkRouteInput): string {
   const exported = given.export_A ?? 0
-  const figures = `The charger can export ${formatAmps(exported)} a phase, with ${formatKilowatts(given.total_generation_kW ?? 0)} of generation in all.`
+  const figures = `The charger can export ${formatBesideLimit(exported, NOTICE_A_PER_PHASE, 'A', 1)} a phase, with ${formatKilowatts(given.total_generation_kW ?? 0)} of generation in all.`
   if (generationForm(given) === 'generation-notice') {
-    return because('DNO-13', `${figures} It is demand and generation: send the demand form, and the notice for generation up to ${NOTICE_A_PER_PHASE} A a phase.`)
+    return because('DNO-13', `${figures} It is demand and generation: send the demand form, and the notice for generation up to ${formatFigure(NOTICE_A_PER_PHASE, 'A')} a phase.`)
   }
-  return because('DNO-13', `${figures} Above ${NOTICE_A_PER_PHASE} A a phase, apply and wait for acceptance before energising.`)
+  return because('DNO-13', `${figures} Above ${formatFigure(NOTICE_A_PER_PHASE, 'A')} a phase, apply and wait for acceptance before energising.`)
 }

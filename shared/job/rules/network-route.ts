@@ -11,7 +11,7 @@ import * as z from 'zod'
 import { fields } from '../../electrical/inputs'
 import { answer, waiting, type Answer, type WorkingStep } from '../../utils/answer'
 import { defineCalculation } from '../../utils/calculation'
-import { formatAmps } from '../../utils/figures'
+import { formatBesideLimit } from '../../utils/figures'
 import { generationForm, NOTICE_DAYS, type NetworkForm } from './generation-form'
 import { country, current, phases, yesOrNo } from './inputs'
 import { limiterConditions, limiterReason } from './load-limiter'
@@ -92,7 +92,7 @@ function generationConditions(form: NetworkForm | null): string[] {
 }
 
 function tellAfterReason(given: NetworkRouteInput): string {
-  return because('DNO-02', `Every condition is met with ${formatAmps(given.md_after_A ?? 0)} after the work. Tell the network operator within ${NOTICE_DAYS} days of installing.`)
+  return because('DNO-02', `Every condition is met with ${formatBesideLimit(given.md_after_A ?? 0, TELL_AFTER_LIMIT_A, 'A', 1)} after the work. Tell the network operator within ${NOTICE_DAYS} days of installing.`)
 }
 
 /** A blank limiter answer is asked for: the limited demand counts only where there is a limiter. */

@@ -1,5 +1,5 @@
 /** The tests that lead to a way to the network operator, in the order in which they decide. */
-import { formatAmps } from '../../utils/figures'
+import { formatBesideLimit, formatFigure } from '../../utils/figures'
 import { exportReason } from './generation-form'
 import { blankKeys } from './inputs'
 import type { NetworkRouteInput } from './network-route'
@@ -67,11 +67,11 @@ function judgeFuse({ md_after_A: demand, cutout_A: fuse, cutout_known: known }: 
   // An assumed rating is met by the test before; it is no figure to hold a demand against.
   if (blank.length || typeof demand !== 'number' || typeof fuse !== 'number' || (known !== 'read' && known !== 'told')) return { blank }
   const isOver = demand > fuse
-  return { reasons: isOver ? [because('DNO-04', `${formatAmps(demand)} after the work is more than the main fuse of ${formatAmps(fuse, 0)}. Apply, and do not connect.`)] : [] }
+  return { reasons: isOver ? [because('DNO-04', `${formatBesideLimit(demand, fuse, 'A', 1)} after the work is more than the main fuse of ${formatFigure(fuse, 'A')}. Apply, and do not connect.`)] : [] }
 }
 
 function judgeThreshold({ md_after_A: demand }: NetworkRouteInput) {
   if (typeof demand !== 'number') return { blank: ['md_after_A'] }
   const isOver = demand > TELL_AFTER_LIMIT_A
-  return { reasons: isOver ? [because('DNO-03', `${formatAmps(demand)} after the work is more than ${TELL_AFTER_LIMIT_A} A. Ask first, whatever the main fuse.`)] : [] }
+  return { reasons: isOver ? [because('DNO-03', `${formatBesideLimit(demand, TELL_AFTER_LIMIT_A, 'A', 1)} after the work is more than ${formatFigure(TELL_AFTER_LIMIT_A, 'A')}. Ask first, whatever the main fuse.`)] : [] }
 }

@@ -35,6 +35,7 @@ describe('deadlines', () => {
 
   it('waits for what it lacks', () => {
     expect(deadlines({}).missing).toEqual(['completed', 'country', 'schemeMember'])
+    expect(deadlines({ completed: '2026-12-01', country: 'Scotland' }).missing).toEqual([])
     expect(deadlines({ completed: '2026-12-01' }).missing).toEqual(['country', 'schemeMember'])
   })
 })

@@ -37,6 +37,12 @@ describe('network-route', () => {
     expect(result.reasons).toEqual(reasons)
   })
 
+  it('never writes a demand over the limit as the limit', () => {
+    expect(routeOf({ md_after_A: 60.04 }).reasons[0]).toContain('60.04\u2009A')
+    expect(routeOf({ md_after_A: 40.01, cutout_A: 40 }).reasons[0]).toContain('40.01\u2009A')
+    expect(routeOf({ export_A: 16.01, total_generation_kW: 3.6823 }).reasons[0]).toContain('16.01\u2009A')
+  })
+
   it('names every further reason, so that no cure meets the next', () => {
     const { reasons } = routeOf({ looped: true, md_after_A: 90 })
     expect(reasons.map(reason => reason.slice(0, 6))).toEqual(['DNO-06', 'SUR-09', 'DNO-04', 'DNO-03'])
