@@ -11,7 +11,7 @@ async function dev() {
   checkNode()
   const personal = { COPPERPLATE_SEED: 'demo', ...personalEnv() }
   const fakes = chooseFakes(personal)
-  sweepLeftovers()
+  await sweepLeftovers()
   const { host, ports } = await portsFromEnv(personal, fakes)
   await step('packages', () => ensurePackages({ onStart: adopt }))
   const database = await startDatabase(personal)

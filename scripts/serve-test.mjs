@@ -9,7 +9,7 @@ import { DATABASES, freshTestDatabases, migrateTest } from './lib/test-databases
 
 async function serveUntilStopped() {
   checkNode()
-  sweepLeftovers()
+  await sweepLeftovers()
   await step('packages', () => ensurePackages({ onStart: adopt }))
   let addresses
   await step('database', async () => {

@@ -22,7 +22,7 @@ async function start() {
   checkNode()
   const personal = { COPPERPLATE_SEED: 'demo', ...personalEnv() }
   const fakes = chooseFakes(personal)
-  sweepLeftovers()
+  await sweepLeftovers()
   const { host, ports } = await portsFromEnv(personal, fakes)
   say('Starting Copperplate')
   await step('packages', () => ensurePackages({ onStart: adopt }))

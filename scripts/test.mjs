@@ -87,7 +87,7 @@ async function testServed(stages, addresses, env) {
 async function testAll() {
   checkNode()
   const stages = readWishes(process.argv.slice(2))
-  sweepLeftovers()
+  await sweepLeftovers()
   const addresses = await setUp(stages)
   const env = { ...cleanEnv(), NUXT_TELEMETRY_DISABLED: '1', CI: process.env.CI ?? '1', NO_COLOR: '1' }
   if (stages.has('types')) await stage('types', () => runCheck('types', 'nuxt/bin/nuxt.mjs', ['typecheck'], env))

@@ -105,10 +105,10 @@ export function stopOnSignals(onStop = () => {}) {
 }
 
 /** Stops what an earlier run left behind because it was killed outright. Only our own checkout's processes are touched. */
-export function sweepLeftovers() {
+export async function sweepLeftovers() {
   const path = inData('run', 'children')
-  if (!existsSync(path) || !existsSync('/proc/self')) return 0
-  let swept = 0
+  if (!existsSync(path) || !existsSync('/proc/self')) return
+  const swept = []
   const kept = readFileSync(path, 'utf8').split('\n').filter((line) => {
     const [parent, pid] = line.split(' ').map(Number)
     if (!pid || !isAlive(pid)) return false
@@ -116,12 +116,14 @@ export function sweepLeftovers() {
     const commandLine = `/proc/${pid}/cmdline`
     if (!existsSync(commandLine) || !readFileSync(commandLine, 'utf8').includes(root)) return false
     signalGroup({ pid }, 'SIGTERM')
-    swept++
+    swept.push(pid)
     return false
   })
   rmSync(path)
   if (kept.length > 0) appendFileSync(path, `${kept.join('\n')}\n`)
-  return swept
+  // Their ports come free when they are gone.
+  for (let tries = 0; swept.some(isAlive) && tries < 50; tries++) await pause(100)
+  for (const pid of swept.filter(isAlive)) signalGroup({ pid }, 'SIGKILL')
 }
 
 /** Waits until an address answers 200, or says why it does not. */

@@ -47,6 +47,8 @@ export function ensureRoles(cluster) {
 }
 
 const prepareSql = database => `
+  create schema if not exists public authorization pg_database_owner;
+  grant usage on schema public to public;
   revoke all on database ${database} from public;
   grant connect on database ${database} to ${ROLES.app}, ${ROLES.worker};
   ${EXTENSIONS.map(name => `create extension if not exists ${name};`).join('\n')}`
