@@ -9,20 +9,20 @@ import type { InspectionRow, InspectionsContent } from './content'
 export function inspectionsPages(content: InspectionsContent, page: { first: boolean }): Content[] {
   return [
     ...openingBlock(content.opening, { orientation: 'landscape', first: page.first }),
+    note(`List of items: ${content.edition}. An item that is unsatisfactory, or not entered, stops signing.`),
     {
       table: {
         headerRows: 1,
         keepWithHeaderRows: 1,
         dontBreakRows: true,
-        widths: [26, '*', EDGE_WIDTH, 170, 170, 130],
+        widths: [26, '*', EDGE_WIDTH, 150, 190, 126],
         body: [['No.', 'What was looked at', '', 'Outcome', 'Rests on', 'Who and when'].map(headCell), ...content.rows.map(toCells)],
       },
-      layout: { ...rowsWithEdges([2]), paddingTop: () => 2, paddingBottom: () => 2 },
+      layout: { ...rowsWithEdges([2]), paddingTop: () => 1.7, paddingBottom: () => 1.7 },
       fontSize: SIZE.table,
       lineHeight: TABLE_LINE,
       margin: [0, 0, 0, 6],
     },
-    note(`List of items: ${content.edition}. An item that is unsatisfactory, or not entered, stops signing.`),
   ]
 }
 

@@ -54,13 +54,14 @@ export const markEdge = (mark: Mark | null): TableCell => cellOf(edgeCell(mark) 
 
 const SIDE_HEAD_WIDTH = 74
 const LABEL_WIDTH = 78
+const LABEL_WIDTH_WIDE_PAGE = 70
 
-/** A group of facts, two (or on a wide page three) abreast, its name in the margin at the left; a group stays on one page. */
+/** A group of facts, two (or on a wide page four) abreast, its name in the margin at the left; a group stays on one page. */
 export function factTable(group: FactGroup, abreast = 2): Content {
   const edges = Array.from({ length: abreast }, (_, at) => 2 + 3 * at)
   return {
     table: {
-      widths: [SIDE_HEAD_WIDTH, ...edges.flatMap(() => [LABEL_WIDTH, EDGE_WIDTH, '*'])],
+      widths: [SIDE_HEAD_WIDTH, ...edges.flatMap(() => [abreast > 2 ? LABEL_WIDTH_WIDE_PAGE : LABEL_WIDTH, EDGE_WIDTH, '*'])],
       body: rowsOf(group.facts, abreast).map((row, at) => [
         at === 0 ? { text: group.title, bold: true, border: [false, true, false, false] } : { text: '', border: [false, false, false, false] },
         ...row.slice(0, -1).flatMap(factCells),

@@ -28,10 +28,10 @@ export function proveItPages(opening: OpeningContent, rows: ProofRow[], page: { 
         headerRows: 1,
         keepWithHeaderRows: 1,
         dontBreakRows: true,
-        widths: [126, EDGE_WIDTH, 96, 80, '*'],
-        body: [['What we checked', '', 'What we found', 'What it must be', 'In short'].map(headCell), ...rows.map(toCells)],
+        widths: [104, EDGE_WIDTH, 84, 62, 96, '*'],
+        body: [['What we checked', '', 'What we found', 'What it must be', 'Verdict', 'In short'].map(headCell), ...rows.map(toCells)],
       },
-      layout: rowsWithEdges([1]),
+      layout: { ...rowsWithEdges([1]), paddingTop: () => 2, paddingBottom: () => 2 },
       fontSize: SIZE.table,
       lineHeight: TABLE_LINE,
     },
@@ -44,6 +44,7 @@ function toCells(row: ProofRow): TableCell[] {
     markEdge(row.mark),
     textCell(row.found, { bold: row.mustBe !== 'N/A', ...(/\d/.test(row.found) && { fontFeatures: ['tnum'] }) }),
     textCell(row.mustBe),
-    stackCell([...(row.mark ? [markBox(row.mark)] : []), row.inShort]),
+    stackCell([row.mark ? markBox(row.mark) : 'N/A']),
+    textCell(row.inShort),
   ]
 }

@@ -46,7 +46,7 @@ function firstCharge(facts: LiveWithItFacts): Advice {
     steps: [
       ...(facts.randomDelay_min ? [`Nothing may happen for up to ${facts.randomDelay_min} minutes. The wait is meant: it keeps many homes from starting at the same second.`] : []),
       'A schedule in the app or in the vehicle can hold the charge until night. Set it in one of them, not in both.',
-      ...(facts.loadLimit_A ? [`When the house uses much at once, the charge slows down or pauses, so that the house stays within ${facts.loadLimit_A} A. It starts again by itself.`] : []),
+      ...(facts.loadLimit_A ? [`When the house uses much at once, the charge slows down or pauses, so that the house stays within ${facts.loadLimit_A}\u202fA. It starts again by itself.`] : []),
       'Stop the charge in the app or at the vehicle before you pull the plug.',
     ],
   }
