@@ -15,14 +15,14 @@ export default {
     },
     fontFamily: { sans: ['Inter', 'system-ui', 'sans-serif'] },
     fontSize: {
-      legal: ['13px', '18px'],
+      /** These four follow the theme: 13, 20, 26 and 40 px, larger in the sun theme. */
+      legal: [token('size-legal'), token('leading-legal')],
       office: ['15px', '22px'],
       tablet: ['17px', '26px'],
       /** Office or tablet or sun size, by the density and theme around it. */
       body: [token('size-body'), token('leading-body')],
-      section: ['20px', '28px'],
-      page: ['26px', '32px'],
-      /** 40 px, in the sun theme 56. */
+      section: [token('size-section'), token('leading-section')],
+      page: [token('size-page'), token('leading-page')],
       reading: [token('size-reading'), token('leading-reading')],
       sun: ['56px', '60px'],
     },
