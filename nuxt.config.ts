@@ -22,7 +22,8 @@ export default defineNuxtConfig({
   },
   tailwindcss: { viewer: false, exposeConfig: false, cssPath: '~/assets/css/tailwind.css' },
   veeValidate: { typedSchemaPackage: 'none' },
-  auth: { loadStrategy: 'none' },
+  // OWASP's floor for scrypt (Password Storage Cheat Sheet): N = 2^17, r = 8, p = 1, which needs 128 MiB a hash.
+  auth: { loadStrategy: 'none', hash: { scrypt: { cost: 131_072, blockSize: 8, parallelization: 1, maxMemory: 256 * 1024 * 1024 } } },
   typescript: {
     strict: true,
     tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } },
@@ -62,6 +63,6 @@ export default defineNuxtConfig({
     },
   },
   runtimeConfig: {
-    session: { password: '', maxAge: 60 * 60 * 12, sessionHeader: false },
+    session: { name: '__Host-copperplate', password: '', maxAge: 60 * 60 * 12, sessionHeader: false, cookie: { path: '/', httpOnly: true, secure: true, sameSite: 'lax' } },
   },
 })

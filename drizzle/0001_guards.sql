@@ -13,7 +13,7 @@ begin
     execute format('alter table %I enable row level security', t.relname);
     execute format('alter table %I force row level security', t.relname);
     if t.has_firm then
-      execute format('create policy one_firm on %I as restrictive using (firm_id = (select current_firm()) or current_user = ''copperplate_owner'') with check (firm_id = (select current_firm()))', t.relname);
+      execute format('create policy one_firm on %I as restrictive to copperplate_app, copperplate_worker using (firm_id = (select current_firm())) with check (firm_id = (select current_firm()))', t.relname);
       execute format('create policy by_firm on %I using (firm_id = (select current_firm())) with check (firm_id = (select current_firm()))', t.relname);
       execute format('grant select, insert, update on %I to copperplate_app, copperplate_worker', t.relname);
     end if;

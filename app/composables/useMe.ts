@@ -1,12 +1,19 @@
-/** Who is signed in, as the shell shows it. */
-export interface Me { id: string, name: string, roles: string[], firmName: string }
+import type { Me } from '#shared/types/firm'
 
-/** The signed-in person, or null on pages without a session. */
+/** The signed-in person, asked of the server once per page load, or null on pages without a session. */
 export function useMe() {
   const me = useState<Me | null>('me', () => null)
-  async function signOut() {
-    me.value = null
-    await navigateTo('/sign-in')
+
+  async function load(): Promise<Me | null> {
+    me.value = await callApi<Me | null>('/api/me')
+    return me.value
   }
-  return { me, signOut }
+
+  async function signOut(): Promise<void> {
+    await callApi('/api/auth/sign-out', { method: 'POST', body: {} })
+    me.value = null
+    await navigateTo('/sign-in', { external: true })
+  }
+
+  return { me, load, signOut }
 }

@@ -62,8 +62,9 @@ export function appEnv({ base, host, ports, fakes, filesDir }) {
   if (fakes.mail) Object.assign(env, { SMTP_HOST: '127.0.0.1', SMTP_PORT: String(ports.mail), SMTP_SECURE: 'false', SMTP_USER: '', SMTP_PASSWORD: '', MAIL_FROM: base.MAIL_FROM || 'Copperplate <post@copperplate.example>' })
   if (fakes.stripe) Object.assign(env, { STRIPE_HOST: '127.0.0.1', STRIPE_PORT: String(ports.stripe), STRIPE_PROTOCOL: 'http' })
   mkdirSync(env.COPPERPLATE_FILES_DIR, { recursive: true, mode: 0o700 })
-  // A secure cookie never comes back over plain http; the session module has a setting of its own for it.
-  if (env.COPPERPLATE_BASE_URL.startsWith('http:')) Object.assign(env, { NUXT_SESSION_COOKIE_SECURE: 'false', NUXT_SESSION_NAME: 'copperplate' })
+  const isSecure = env.COPPERPLATE_COOKIE_SECURE || String(env.COPPERPLATE_BASE_URL.startsWith('https:'))
+  // Not every browser sends a secure cookie back over plain http, and none keeps a __Host- name without it.
+  if (isSecure === 'false') Object.assign(env, { NUXT_SESSION_COOKIE_SECURE: 'false', NUXT_SESSION_NAME: 'copperplate' })
   return env
 }
 
