@@ -15,7 +15,8 @@ export async function serveForTests(addresses) {
   const filesDir = inData('test-files')
   rmSync(filesDir, { recursive: true, force: true })
   rmSync(inData('test-mail'), { recursive: true, force: true })
-  const base = { ...cleanEnv(), ...testValues(addresses), COPPERPLATE_SEED: 'demo' }
+  // The cookie as it is in earnest: Chromium takes a secure one from this machine itself over plain http.
+  const base = { ...cleanEnv(), ...testValues(addresses), COPPERPLATE_SEED: 'demo', COPPERPLATE_COOKIE_SECURE: 'true' }
   const parts = { env: appEnv({ base, host, ports, fakes, filesDir }), ports, fakes, label: 'test' }
   await seed(parts.env)
   await startFakes(parts)
