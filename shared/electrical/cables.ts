@@ -54,8 +54,8 @@ export function ratedAs(word: CableWord, terminals_C: 70 | 90): CableWord {
 }
 
 export interface Found extends Cited {
-  value: number
-  table: string
+  readonly value: number
+  readonly table: string
 }
 
 function ratingColumn(word: CableWord, table: ReferenceTable, method: MethodWord | undefined, phases: Phases): string {
@@ -78,25 +78,36 @@ export function assertCableUse(word: CableWord, method: MethodWord | undefined, 
   if (method !== undefined && !methods.includes(method)) throw new CalculationInputError(path, `Table ${CABLES[word].ratings[0]!.id} has no method ${method} for this cable. It has ${methods.join(', ')}.`)
 }
 
+/** Remembers what was found (never what was not, so that odd sizes cannot fill it): a circuit asks for the same cells on every keystroke. */
+function remembered(look: (word: CableWord, size_mm2: number, method: MethodWord | undefined, phases: Phases) => Found | null): typeof look {
+  const known = new Map<string, Found>()
+  return (word, size_mm2, method, phases) => {
+    const key = `${word} ${size_mm2} ${method} ${phases}`
+    const found = known.get(key) ?? look(word, size_mm2, method, phases)
+    if (found) known.set(key, found)
+    return found
+  }
+}
+
 /** Current-carrying capacity of one size, A; null where the table leaves it blank. */
-export function findRating(word: CableWord, size_mm2: number, method: MethodWord | undefined, phases: Phases): Found | null {
+export const findRating = remembered((word, size_mm2, method, phases) => {
   for (const table of CABLES[word].ratings) {
     const column = ratingColumn(word, table, method, phases)
     const value = numberAt(exactRow(table.rows, 'size_mm2', size_mm2), column)
     if (value !== null) return { value, table: table.id, ...cite(table, column, size_mm2) }
   }
   return null
-}
+})
 
 /** Volt drop, mV per amp and metre; of cells with r, x and z the impedance z, which is the most. Null where the table ends. */
-export function findDrop(word: CableWord, size_mm2: number, method: MethodWord | undefined, phases: Phases): Found | null {
+export const findDrop = remembered((word, size_mm2, method, phases) => {
   const { drop: table, dropFactor } = CABLES[word]
   const column = table === table4D5 ? 'mV_per_A_m' : table === table4D1B ? `${method === 'C' ? 'C' : 'AB'}_${phases}ph` : phases === 1 ? 'one_phase' : 'three_phase'
   const row: Row | undefined = exactRow<Row>(table.rows, 'size_mm2', size_mm2)
   const cell = row?.[column]
   const value = typeof cell === 'number' ? cell : (cell as { z: number } | null | undefined)?.z
   return value === undefined ? null : { value: value * dropFactor, table: table.id, ...cite(table, column, size_mm2) }
-}
+})
 
 /** The protective conductor inside a twin and earth of this size, mm². */
 export function ownProtectiveConductor(word: CableWord, size_mm2: number): number | null {

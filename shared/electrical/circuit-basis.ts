@@ -9,7 +9,7 @@ import type { CircuitInput } from './circuit-input'
 import { designCurrent } from './design-current'
 import { findDeviceLimit } from './device-limits'
 import type { DeviceLimit } from './device-limits'
-import { findLegFactors, fuseFactor } from './leg-factors'
+import { findLegFactors } from './leg-factors'
 import type { LegFactors } from './leg-factors'
 import { findLetThrough, TABULATED_ICN } from './let-through-table'
 import type { LetThrough } from './let-through-table'
@@ -109,8 +109,8 @@ export function circuitBasis(input: CircuitInput): Basis {
 function toLeg(input: CircuitInput, leg: NonNullable<CircuitInput['legs']>[number], index: number, rated: CableWord, phases: Phases): Leg {
   const path = `legs.${index}.`
   assertCableUse(rated, leg.method, phases, `${path}method`)
-  const given = { ...fuseFactor(input.device), ...(leg.method === 'D' && input.Cc !== undefined ? { Cc: input.Cc } : {}) }
-  return { method: leg.method, L_m: leg.L_m!, ...findLegFactors({ ...leg, insulation_C: CABLES[rated].insulation_C, given, path }) }
+  const given = leg.method === 'D' && input.Cc !== undefined ? { Cc: input.Cc } : {}
+  return { method: leg.method, L_m: leg.L_m!, ...findLegFactors({ ...leg, insulation_C: CABLES[rated].insulation_C, device: input.device, given, path }) }
 }
 
 /** In TT the overcurrent limit is information only, so a rating the table lacks is no reason to refuse. */

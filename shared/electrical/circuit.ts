@@ -74,7 +74,7 @@ export function circuit(input: CircuitInput): Answer<CircuitResult> {
 }
 
 function reasonsOf(input: CircuitInput, judged: JudgedSize[], show: JudgedSize): string[] {
-  if (show.verdict === 'within') return []
+  if (show.verdict === 'within') return [`${show.S_mm2} mm² is ${input.S_mm2 === undefined ? 'the smallest size ' : ''}within every limit.`]
   if (input.S_mm2 !== undefined || judged.length === 1) return show.reasons
   return ['No size of this cable is within every limit.', ...show.reasons]
 }

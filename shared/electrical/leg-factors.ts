@@ -37,6 +37,8 @@ interface Given extends Surroundings {
   insulation_C: InsulationTemperature
   /** Factors the person gave; each outranks what the surroundings would say. */
   given?: Partial<Factors>
+  /** A semi-enclosed fuse brings Cf. */
+  device?: string
   /** Where in the input this stretch sits, such as `legs.0.`. */
   path?: string
 }
@@ -74,7 +76,7 @@ export function findLegFactors(leg: Given): LegFactors {
   const laying = leg.laying ?? layingOf(leg.arrangement)
   take('Cs', () => buried && leg.rho_Km_per_W !== undefined ? soilFactor(leg.rho_Km_per_W, laying, `${path}rho_Km_per_W`) : null)
   take('Cd', () => buried && leg.depth_m !== undefined ? depthFactor(leg.depth_m, laying, `${path}depth_m`) : null)
-  take('Cf', () => null)
+  take('Cf', () => leg.device === 'BS3036' ? protectionFactor('Cf') : null)
   take('Cc', () => null)
 
   if (buried && leg.ambient_C !== undefined) notes.push('A buried leg goes by the temperature of the ground: the air temperature is left out of it.')
@@ -97,11 +99,6 @@ function grouping(leg: Given, buried: boolean, path: string, notes: string[]): F
 function layingOf(arrangement: Arrangement | undefined): Laying | undefined {
   if (!arrangement || !isBelowGround(arrangement)) return undefined
   return arrangement.startsWith('ducts') ? 'ducts' : 'direct'
-}
-
-/** Cf follows from the device where the person has not given it. */
-export function fuseFactor(device: string | undefined): Partial<Factors> {
-  return device === 'BS3036' ? { Cf: protectionFactor('Cf').factor } : {}
 }
 
 /** The factors that are not 1, as they stand in a product: ` × 0.94 × 0.8`. */

@@ -51,9 +51,9 @@ export function isBelowGround(arrangement: Arrangement): boolean {
   return GROUPING[arrangement].table !== table4C1
 }
 
-function found(table: ReferenceTable, row: Row | undefined, keyColumn: string, column: string, expression: string, pastTheEnd: CalculationInputError): FactorFound {
+function found(table: ReferenceTable, row: Row | undefined, keyColumn: string, column: string, expression: string, pastTheEnd: () => CalculationInputError): FactorFound {
   const factor = numberAt(row, column)
-  if (factor === null) throw pastTheEnd
+  if (factor === null) throw pastTheEnd()
   return { factor, table: table.id, expression, ...cite(table, column, row![keyColumn] as number) }
 }
 
@@ -63,20 +63,20 @@ const temperatureColumn = (insulation_C: InsulationTemperature) => `c${insulatio
 export function ambientFactor(ambient_C: number, insulation_C: InsulationTemperature, path = 'ambient_C'): FactorFound {
   const row = rowFrom(table4B1.rows, 'ambient_C', ambient_C)
   return found(table4B1, row, 'ambient_C', temperatureColumn(insulation_C), `air at ${ambient_C} °C, insulation for ${insulation_C} °C`,
-    new CalculationInputError(path, `Table 4B1 gives no factor at ${ambient_C} °C for insulation rated ${insulation_C} °C.`))
+    () => new CalculationInputError(path, `Table 4B1 gives no factor at ${ambient_C} °C for insulation rated ${insulation_C} °C.`))
 }
 
 /** Ca in the ground (reference 20 °C). The table has no column for 60 °C insulation. */
 export function groundFactor(ground_C: number, insulation_C: InsulationTemperature, path = 'ground_C'): FactorFound {
   const row = rowFrom(table4B2.rows, 'ground_C', ground_C)
   return found(table4B2, row, 'ground_C', temperatureColumn(insulation_C), `ground at ${ground_C} °C, insulation for ${insulation_C} °C`,
-    new CalculationInputError(path, `Table 4B2 gives no factor at ${ground_C} °C for insulation rated ${insulation_C} °C.`))
+    () => new CalculationInputError(path, `Table 4B2 gives no factor at ${ground_C} °C for insulation rated ${insulation_C} °C.`))
 }
 
 /** Cs by soil resistivity or Cd by depth; where the laying is not said, the lower of the two columns. */
 function byLaying(table: ReferenceTable, key: string, value: number, laying: Laying | undefined, words: string, path: string): FactorFound {
   const row = rowFrom(table.rows, key, value)
-  const end = new CalculationInputError(path, `Table ${table.id} ends before ${value}. Give the factor itself, from the printed standard.`)
+  const end = () => new CalculationInputError(path, `Table ${table.id} ends before ${value}. Give the factor itself, from the printed standard.`)
   if (laying) return found(table, row, key, laying, `${words}, ${laying === 'ducts' ? 'in ducts' : 'laid direct'}`, end)
   const direct = found(table, row, key, 'direct', words, end)
   const ducts = found(table, row, key, 'ducts', words, end)
@@ -98,7 +98,7 @@ export function groupingFactor(circuits: number, arrangement: Arrangement, path 
   const words = `${circuits} ${circuits === 1 ? 'circuit' : 'circuits'}, ${arrangement}`
   if (circuits === 1) return { factor: 1, table: table.id, expression: words, ...cite(table, column, 1) }
   const row = rowFrom(table.rows, 'circuits', circuits)
-  return found(table, row, 'circuits', column, words, new CalculationInputError(path, `Table ${table.id} ends before ${circuits} circuits.`))
+  return found(table, row, 'circuits', column, words, () => new CalculationInputError(path, `Table ${table.id} ends before ${circuits} circuits.`))
 }
 
 /** Ci for a cable wholly inside thermal insulation over this length. */

@@ -10,7 +10,7 @@
 import type * as z from 'zod'
 import { answer, waiting } from '../utils/answer'
 import type { Answer } from '../utils/answer'
-import { CalculationInputError, defineCalculation } from '../utils/calculation'
+import { defineCalculation } from '../utils/calculation'
 import { notAbove } from './compare'
 import { DEVICE_WORDS, findDeviceLimit } from './device-limits'
 import { above, anyNumber, Cmin, fields, fromZero, oneOf, system, U0_V } from './inputs'
@@ -62,7 +62,6 @@ function inTN({ device, In_A, time_s = 0.4, Cmin = 0.95, U0_V = 230, measured_oh
   if (measured_ohm === undefined) return answer({ result, working, notes })
 
   if (R1R2_ohm !== undefined && ambient_C !== undefined && multiplier !== undefined) {
-    if (R1R2_ohm > measured_ohm) throw new CalculationInputError('R1R2_ohm', 'R1+R2 is a part of the loop: it cannot be more than the reading.')
     const ZsCorrected_ohm = measured_ohm + R1R2_ohm * (temperatureRatio(multiplier, ambient_C) - 1)
     const fits = notAbove(ZsCorrected_ohm, ZsMax_ohm)
     return answer({
@@ -70,7 +69,11 @@ function inTN({ device, In_A, time_s = 0.4, Cmin = 0.95, U0_V = 230, measured_oh
       result: { ...result, ZsCorrected_ohm },
       working: [...working, step('Zs hot', `${shown(measured_ohm)} + ${shown(R1R2_ohm)} × (${shown(multiplier)} ÷ (1 + 0.004 × (${shown(ambient_C)} − 20)) − 1)`, ZsCorrected_ohm, 'Ω', 'On-Site Guide tables I2 and I3', 'from memory')],
       reasons: [`TST-08: corrected for temperature the loop is ${shown(ZsCorrected_ohm)} Ω, ${fits ? 'within' : 'more than'} ${shown(ZsMax_ohm)} Ω.`],
-      notes: [...notes, 'TST-21: the reading is assessed by temperature, so it is held against the whole limit and not against 80 % of it.'],
+      notes: [
+        ...notes,
+        'TST-21: the reading is assessed by temperature, so it is held against the whole limit and not against 80 % of it.',
+        ...R1R2_ohm > measured_ohm ? ['R1+R2 is more than the whole loop reads: there is a second path to earth, or one of the two is wrong.'] : [],
+      ],
     })
   }
   const fits = notAbove(measured_ohm, ZsMeasuredMax_ohm)

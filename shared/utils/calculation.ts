@@ -2,7 +2,7 @@
  * What every calculation is to the outside: a name, a purpose, an input schema and one pure function.
  * The `calc` command line, the API route and the screens all go through `runCalculation`.
  */
-import * as z from 'zod'
+import type * as z from 'zod'
 import type { Answer, CalculationProblem } from './answer'
 
 export interface Calculation<I, R> {
