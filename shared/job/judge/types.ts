@@ -1,7 +1,16 @@
 /** What a job's judgement holds: every figure computed once, for tablet, server and paper alike. */
+import type { BreakingCapacityResult } from '../../electrical/breaking-capacity'
+import type { CircuitResult } from '../../electrical/circuit'
+import type { SizeResult } from '../../electrical/circuit-sizes'
+import type { DemandResult } from '../../electrical/demand'
+import type { SupplyResult } from '../../electrical/supply'
+import type { ZsLimitResult } from '../../electrical/zs-limit'
 import type { ReadingRow } from '../../types/record'
 import type { Answer, Confidence } from '../../utils/answer'
 import type { Verdict } from '../../utils/verdict'
+import type { EarthingMethodResult } from '../rules/earthing-method'
+import type { MountingResult } from '../rules/mounting'
+import type { NetworkRouteResult } from '../rules/network-route'
 import type { TestKey } from '../tests.data'
 
 /** The page of a job that a field lives on. */
@@ -30,14 +39,6 @@ export interface Judged<Result> {
   /** What a `waiting` verdict waits for. */
   waitsFor: FieldRef[]
 }
-
-export interface DemandFigures { items: { use: string, connected_A: number, demand_A: number }[], total_A: number }
-export interface SupplyFigures { demandAfter_A: number, headroom_A: number, evAllowed_A: number, limitNeeded: boolean, limitSetting_A: number, demandIfLimited_A: number }
-export interface RouteFigures { route: 'tell-after' | 'ask-first' | 'contact' | 'generation-application', installAllowed: boolean, deadlineDays: number | null, conditions: string[], forms: string[], reasons: string[] }
-export interface SizeFigures { S_mm2: number, Iz_A: number, volt_drop_V: number, percent: number, R1R2_ohm: number, Zs_ohm: number, adiabatic_mm2: number, verdict: 'within' | 'outside' | 'waiting', firstReason: string | null }
-export interface LegFigures { It_A: number, Iz_A: number }
-export interface CircuitFigures { sizes: SizeFigures[], S_mm2: number | null, legs: LegFigures[], maxLength_m: number }
-export interface EmptyFigures { [key: string]: unknown }
 
 /** What the house draws at most, each way it is known, and the one that is used: the greater. */
 export interface HouseDemand {
@@ -98,7 +99,7 @@ export interface JudgedReading {
   /** The sentence that an Unexpected stands on. */
   sentence: string | null
   /** Zs assessed by temperature, where that lifted it. */
-  corrected: { value: number, text: string } | null
+  corrected: { value: number, text: string, limitText: string } | null
   /** What it waits for, where it cannot be judged yet. */
   waitsFor: FieldRef[]
   reasons: string[]
@@ -127,25 +128,35 @@ export interface JudgedConfidence {
 
 export interface Judgement {
   system: 'TN' | 'TT'
+  /** Edition of the wiring rules in force on the day. */
+  edition: string
   houseDemand: HouseDemand
   /** The charger's full current, A a phase. */
   ev_A: number | null
-  demand: Judged<DemandFigures>
-  supply: Judged<SupplyFigures>
+  demand: Judged<DemandResult>
+  supply: Judged<SupplyResult>
   capacity: Capacity
-  route: Judged<RouteFigures>
-  earthing: Judged<EmptyFigures>
-  breakingCapacity: Judged<EmptyFigures>
+  route: Judged<NetworkRouteResult>
+  earthing: Judged<EarthingMethodResult>
+  breakingCapacity: Judged<BreakingCapacityResult>
   /** Every size compared, on the designed figures. */
-  designed: Judged<CircuitFigures>
+  designed: Judged<CircuitResult>
+  /** The same at the chosen size alone, with its legs and longest route; the same answer where no size is chosen. */
+  chosen: Judged<CircuitResult>
   /** The size that the design stands on: the chosen one, or else the smallest that is within. */
-  designedSize: SizeFigures | null
+  designedSize: SizeResult | null
   /** The circuit as installed; what was not recorded as installed is taken from the design. */
-  installed: Judged<CircuitFigures>
-  installedSize: SizeFigures | null
-  mounting: Judged<EmptyFigures>
+  installed: Judged<CircuitResult>
+  installedSize: SizeResult | null
+  /** The outlet's height; null with a tethered cable. */
+  mounting: Judged<MountingResult> | null
   /** External loop impedance in use: measured or by enquiry, else the declared most of the arrangement. */
   Ze: { value: number, how: 'measured' | 'by enquiry' | 'declared' } | null
+  /** The largest loop impedance the installed device allows. */
+  zsLimit: Judged<ZsLimitResult>
+  /** The run as fitted and as drawn, m. */
+  fitted_m: number | null
+  designed_m: number | null
   readings: Record<TestKey, JudgedReading>
   safety: SafetyFigure[]
   confidence: JudgedConfidence
