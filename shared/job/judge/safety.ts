@@ -1,7 +1,7 @@
 /** The safety figures of a job in one list: what PRODUCT calls the figures on which Outside limit always stops signing. */
 import { VERDICT_WORDS, type Verdict } from '../../utils/verdict'
 import { TEST_KEYS, type TestKey } from '../tests.data'
-import { readingRef } from './field-refs'
+import { fieldRef, readingRef } from './field-refs'
 import { listWords } from './judged'
 import type { Judged, JudgedReading, Judgement, SafetyFigure } from './types'
 
@@ -13,7 +13,7 @@ export function safetyFigures(sheets: Sheets, readings: Record<TestKey, JudgedRe
     sheetFigure('supply', 'Supply', supply, 'supply', 'survey.survey.cutout_A'),
     sheetFigure('cable', 'Cable', installed, 'cable', 'circuit.installed.S_mm2'),
     sheetFigure('earthing-method', 'Earthing method', earthing, 'point', 'earthing.earthing.method'),
-    sheetFigure('breaking-capacity', 'Breaking capacity', breakingCapacity, 'board', 'circuit.installed.device_kA'),
+    breaking(breakingCapacity),
     upstream(sheets.upstreamRcd),
     ...TEST_KEYS.map(test => readings[test]).filter(each => each.isSafety).map(readingFigure),
   ]
@@ -27,11 +27,18 @@ function sheetFigure(id: string, label: string, sheet: Judged<unknown>, page: Sa
   return { id, label, verdict, sentence: sentence(label, verdict, why), page: verdict === 'waiting' && first ? first.page : page, field: verdict === 'waiting' && first ? first.field : field }
 }
 
+/** Until somebody measured or asked, the fault current is a convention: nothing is signed on it. */
+function breaking(sheet: Judged<unknown>): SafetyFigure {
+  if (sheet.input.Ipf_kA !== undefined) return sheetFigure('breaking-capacity', 'Breaking capacity', sheet, 'board', 'circuit.installed.device_kA')
+  const ref = readingRef('Ipf')
+  return { id: 'breaking-capacity', label: 'Breaking capacity', verdict: 'waiting', sentence: sentence('Breaking capacity', 'waiting', `Needs ${ref.words}.`), page: ref.page, field: ref.field, waitsFor: [ref] }
+}
+
 /** A type AC device upstream can be blinded by d.c. from the vehicle (rule EAR-16). */
 function upstream(type: string | undefined): SafetyFigure {
   const verdict: Verdict = type === undefined ? 'waiting' : type === 'type-AC' ? 'outside' : type === 'none' ? 'not-applicable' : 'within'
   const why = verdict === 'waiting' ? 'Needs what residual-current device is upstream.' : verdict === 'outside' ? 'EAR-16: a type AC device upstream can be blinded by direct current. Feed the circuit from before it, or change it.' : ''
-  return { id: 'upstream-rcd', label: 'Residual-current device upstream', verdict, sentence: sentence('Residual-current device upstream', verdict, why), page: 'board', field: 'survey.survey.upstream_rcd' }
+  return { id: 'upstream-rcd', label: 'Residual-current device upstream', verdict, sentence: sentence('Residual-current device upstream', verdict, why), page: 'board', field: 'survey.survey.upstream_rcd', waitsFor: [fieldRef('survey', 'survey', 'upstream_rcd')] }
 }
 
 function readingFigure(reading: JudgedReading): SafetyFigure {

@@ -117,6 +117,8 @@ export interface SafetyFigure {
   sentence: string
   page: JobPage
   field: string
+  /** What a `waiting` figure waits for, where that is not its sheet's own list. */
+  waitsFor?: FieldRef[]
 }
 
 export interface JudgedConfidence {
