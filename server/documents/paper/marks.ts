@@ -30,14 +30,19 @@ export function edgeCell(mark: Mark | null, rowSpan = 1): TableCell {
   return { text: '', ...(fill && { fillColor: fill }), ...(isBracket && { border: [true, true, false, true] }), ...(rowSpan > 1 && { rowSpan }) }
 }
 
+type Room = [number, number, number, number]
+const UNDER_FIGURE: Room = [0, 1.5, 0, 1]
+/** For a box that has a cell to itself. */
+export const ALONE: Room = [0, 0, 0, 0]
+
 /** The box with the verdict's words: filled, double, dashed, single or bracketed, as the verdict asks; N/A has no box. */
-export function markBox(mark: Mark): Content {
+export function markBox(mark: Mark, room: Room = UNDER_FIGURE): Content {
   const isFilled = mark.verdict === 'within'
   const words: Content = { text: mark.words, fontSize: SIZE.note, bold: mark.verdict === 'outside' || isFilled, color: isFilled ? '#ffffff' : INK, fontFeatures: ['tnum'] }
   if (mark.verdict === 'not-applicable') return words
-  const inner: Content = { table: { widths: ['auto'], body: [[{ ...words, ...(isFilled && { fillColor: INK }) }]] }, layout: boxLayout(mark.verdict), margin: [0, 1.5, 0, 1] }
+  const inner: Content = { table: { widths: ['auto'], body: [[{ ...words, ...(isFilled && { fillColor: INK }) }]] }, layout: boxLayout(mark.verdict), margin: room }
   if (mark.verdict !== 'outside') return inner
-  return { table: { widths: ['auto'], body: [[{ ...inner, margin: 0 }]] }, layout: OUTER_RULE, margin: [0, 1.5, 0, 1] }
+  return { table: { widths: ['auto'], body: [[{ ...inner, margin: 0 }]] }, layout: OUTER_RULE, margin: room }
 }
 
 const LINE = 0.7

@@ -1,5 +1,5 @@
 import type { Content, TableCell } from 'pdfmake/interfaces'
-import { EDGE_WIDTH, markBox } from '../paper/marks'
+import { ALONE, EDGE_WIDTH, markBox } from '../paper/marks'
 import { openingBlock, sectionHead, sentence, type OpeningContent } from '../paper/opening'
 import { headCell, markEdge, rowsWithEdges, stackCell, textCell } from '../paper/tables'
 import { SIZE, TABLE_LINE } from '../paper/tokens'
@@ -44,7 +44,7 @@ function toCells(row: ProofRow): TableCell[] {
     markEdge(row.mark),
     textCell(row.found, { bold: row.mustBe !== 'N/A', ...(/\d/.test(row.found) && { fontFeatures: ['tnum'] }) }),
     textCell(row.mustBe),
-    stackCell([row.mark ? markBox(row.mark) : 'N/A']),
+    stackCell([row.mark ? markBox(row.mark, ALONE) : 'N/A']),
     textCell(row.inShort),
   ]
 }
