@@ -16,9 +16,10 @@ export interface LockedJob {
   isOwn: boolean
 }
 
+/** In a select from one table Drizzle writes bare column names, which inside the subquery would mean the visit's own: so they are spelled out. */
 const columns = (crewId: string | null) => ({
   id: job.id, ref: job.ref, customerId: job.customerId, premisesId: job.premisesId, stage: job.stage, sideState: job.sideState, recordVersion: job.recordVersion,
-  isOwn: sql<boolean>`exists (select 1 from ${visit} v where v.firm_id = ${job.firmId} and v.job_id = ${job.id} and v.crew_id = ${crewId}::uuid and v.state <> 'cancelled')`,
+  isOwn: sql<boolean>`exists (select 1 from ${visit} v where v.firm_id = job.firm_id and v.job_id = job.id and v.crew_id = ${crewId}::uuid and v.state <> 'cancelled')`,
 })
 
 /** The job, or null where there is none of that id in the firm (another firm's is not there either). */
