@@ -142,9 +142,10 @@ export function giveReason(state: PadState, reason: string): PadState {
   return settle(state, { asking: null, kept: { kind: state.asking, shown: state.asking === 'limited' ? 'LIM' : 'N/A', value: null, unit: state.unit, reason: words } })
 }
 
+const KEYBOARD: ReadonlyMap<string, PadKey> = new Map([['.', '.'], [',', '.'], ['Decimal', '.'], ['>', '>'], ['Backspace', 'back'], ['Delete', 'clear'], ['Enter', 'keep'], ['u', 'unit'], ['l', 'lim'], ['n', 'na']])
+
 /** The pad's key for a key of a real keyboard, or null where the pad has none. */
 export function padKeyFor(key: string): PadKey | null {
   if (/^[0-9]$/.test(key)) return key as PadKey
-  const named: Readonly<Record<string, PadKey>> = { '.': '.', ',': '.', 'Decimal': '.', '>': '>', 'Backspace': 'back', 'Delete': 'clear', 'Enter': 'keep', 'u': 'unit', 'l': 'lim', 'n': 'na' }
-  return named[key.length === 1 ? key.toLowerCase() : key] ?? null
+  return KEYBOARD.get(key.length === 1 ? key.toLowerCase() : key) ?? null
 }
