@@ -1,0 +1,10 @@
+/**
+ * Where to go after signing in: a path of our own pages, or the first page. Whatever a link says, nobody is sent to
+ * another site by it.
+ */
+export function safeNext(next: unknown): string {
+  if (typeof next !== 'string' || !next.startsWith('/') || /^\/[/\\]/.test(next) || /[\u0000-\u001F\\]/.test(next)) return '/'
+  const here = 'https://here.invalid'
+  const url = URL.canParse(next, here) ? new URL(next, here) : null
+  return url?.origin === here ? url.pathname + url.search + url.hash : '/'
+}
