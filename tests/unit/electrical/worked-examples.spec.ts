@@ -26,7 +26,7 @@ function compare(actual: unknown, expected: unknown, tolerance: Record<string, n
 }
 
 describe('worked examples', () => {
-  it.each((fixture.examples as Example[]).map(example => [`${example.id} ${example.calc}`, example] as const))('%s', (_title, example) => {
+  it.each((fixture.examples as unknown as Example[]).map(example => [`${example.id} ${example.calc}`, example] as const))('%s', (_title, example) => {
     const calculation = electricalCalculations[example.calc]
     expect(calculation, example.calc).toBeDefined()
     const reply = runCalculation(calculation!, example.input)
