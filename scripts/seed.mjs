@@ -26,6 +26,11 @@ async function hasFirm(owner) {
   return found
 }
 
+/** What is half made stays: events and readings are never removed. */
+function refuseHalf(error) {
+  throw new Mendable('The invented firm could not be finished', 'make the database anew (`node scripts/db-up.mjs --fresh`) and run this again', error.stack)
+}
+
 async function run(now) {
   completeEnv()
   const url = process.env.DATABASE_URL_OWNER
@@ -36,7 +41,7 @@ async function run(now) {
   try {
     if (await hasFirm(owner)) return say('A firm is already there; nothing was added.')
     services = await loadServices()
-    const { firm, jobs } = await seedDemo({ services, owner, now })
+    const { firm, jobs } = await seedDemo({ services, owner, now }).catch(refuseHalf)
     say(`${firm.name} with ${jobs} jobs`)
   }
   finally {

@@ -13,6 +13,6 @@ export async function installBooked(acts) {
   }
   await book('bookedTomorrow', { since: 20, survey: 'pme80', demand: 'modest', design: 'shortTwin', offset: 1, half: 'am', crew: 'A' })
   await book('bungalow', { since: 18, survey: 'bungalowTT', demand: 'small', design: 'bungalowTT', offset: 3, half: 'am', crew: 'B' })
-  await book('limitedBooked', { since: 17, survey: 'pme60', demand: 'withShower', design: 'armoured', limiter: LIMITER_60, offset: 6, half: 'am', crew: 'A' })
+  await book('limitedBooked', { since: 17, survey: 'pme60', demand: 'busy', design: 'armoured', limiter: LIMITER_60, offset: 6, half: 'am', crew: 'A' })
   await book('laterBooked', { since: 14, survey: 'pme80', demand: 'low', design: 'armoured', offset: 13, half: 'pm', crew: 'B' })
 }

@@ -12,7 +12,7 @@ export async function surveyed(acts) {
   const fits = await survey('fitsWell', 12, { survey: 'pme80', demand: 'modest', daysAgo: 6 })
   await designCircuit(acts, fits, 'shortTwin', { daysAgo: 5 })
 
-  const small = await survey('smallFuse', 11, { survey: 'pme60', demand: 'withShower', daysAgo: 5, crew: 'B' })
+  const small = await survey('smallFuse', 11, { survey: 'pme60', demand: 'busy', daysAgo: 5, crew: 'B' })
   await designCircuit(acts, small, 'armoured', { daysAgo: 4, limiter: LIMITER_60 })
 
   const ask = await survey('askFirst', 16, { survey: 'pme100', demand: 'gasHeated', daysAgo: 9 })
