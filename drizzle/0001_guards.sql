@@ -178,6 +178,13 @@ create function find_papers_to_make(p_limit integer) returns table (firm_id uuid
   language sql stable security definer set search_path = public, pg_temp as $$
   select p.firm_id, p.id from paper p where p.state = 'to-make' order by p.made_at limit p_limit $$;
 --> statement-breakpoint
+-- The worker sleeps until there is something to send.
+create function wake_outbox() returns trigger language plpgsql as $$ begin perform pg_notify('outbox', ''); return null; end $$;
+--> statement-breakpoint
+create trigger wake_outbox after insert on outbox_message for each statement execute function wake_outbox();
+--> statement-breakpoint
+create trigger wake_outbox after update of state on paper for each statement execute function wake_outbox();
+--> statement-breakpoint
 -- One page of the jobs list in one round trip: sets the firm for this statement and reads under row security.
 create function job_page(p_firm uuid, p_stage text, p_before timestamptz, p_before_id uuid, p_limit integer)
   returns table (id uuid, ref text, stage text, side_state text, with_whom text, next_day date, changed_at timestamptz, customer text, address text, town text, postcode text)

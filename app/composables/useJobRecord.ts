@@ -5,6 +5,7 @@ import { partSpec, type Part } from '#shared/job/parts'
 import { mayDo, type Act } from '#shared/job/permissions'
 import { mayChangeWork } from '#shared/job/stages'
 import type { FieldValue } from '#shared/job/fields/field'
+import type { HeldChange } from '~/stores/jobRecords'
 import { londonDay } from '#shared/utils/dates'
 
 /**
@@ -39,8 +40,14 @@ export function useJobRecord(jobId: string) {
   const mutate = (kind: string, payload: Record<string, unknown>) => store.mutate(jobId, kind, payload)
   const addReading = (reading: Omit<ReadingPayload, 'deviceId'>) => store.mutate(jobId, 'add-reading', reading)
 
+  /** What was entered here is put in over what stands there now, as a new change on the newest row. */
+  async function useMine(change: HeldChange): Promise<void> {
+    store.letGo(change)
+    await store.mutate(jobId, change.mutation.kind, change.mutation.payload)
+  }
+
   const held = computed(() => store.held.filter(change => change.mutation.jobId === jobId))
   const waiting = computed(() => store.waiting.filter(mutation => mutation.jobId === jobId).length)
 
-  return { record, judgement, looseEnds, today, may, lockOf, rows, row, value, change, remove, mutate, addReading, held, waiting, keptAt: computed(() => store.keptAt), sentAt: computed(() => store.sentAt), isOffline: computed(() => store.isOffline), letGo: store.letGo, load: () => store.load(jobId) }
+  return { record, judgement, looseEnds, today, may, lockOf, rows, row, value, change, remove, mutate, addReading, held, waiting, keptAt: computed(() => store.keptAt), sentAt: computed(() => store.sentAt), isOffline: computed(() => store.isOffline), letGo: store.letGo, useMine, load: () => store.load(jobId) }
 }

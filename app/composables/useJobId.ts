@@ -1,0 +1,4 @@
+/** The job that the page's address names. */
+export function useJobId(): string {
+  return String(useRoute().params.jobId)
+}
