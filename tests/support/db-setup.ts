@@ -1,10 +1,23 @@
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
 import { drizzle, type NodePgDatabase } from 'drizzle-orm/node-postgres'
 import pg from 'pg'
 import { afterAll } from 'vitest'
+import { closeDatabase } from '#server/db/pool'
 import { findTestDatabase } from './test-addresses'
 
 const addresses = findTestDatabase()
 if (!addresses) throw new Error('Database tests need their database: run `node scripts/db-up.mjs --migrate` once, or `npm test`.')
+
+// What the services read of their surroundings: this database as the web's own role, and nothing of the person's own.
+Object.assign(process.env, {
+  COPPERPLATE_ROLE: 'web',
+  COPPERPLATE_BASE_URL: 'http://127.0.0.1:3000',
+  COPPERPLATE_KEY_SECRET: Buffer.alloc(32, 7).toString('base64'),
+  COPPERPLATE_FILES_DIR: join(tmpdir(), 'copperplate-db-tests'),
+  NUXT_SESSION_PASSWORD: 'for database tests only, no cookie is made',
+  DATABASE_URL: addresses.app,
+})
 
 function openPool(connectionString: string) {
   const pool = new pg.Pool({ connectionString, max: 4 })
@@ -18,6 +31,7 @@ function openPool(connectionString: string) {
 export const pools = { app: openPool(addresses.app), worker: openPool(addresses.worker), owner: openPool(addresses.owner) }
 
 afterAll(async () => {
+  await closeDatabase()
   await Promise.all(Object.values(pools).map(pool => pool.end()))
 })
 
