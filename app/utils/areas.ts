@@ -2,7 +2,7 @@
 export interface Area { word: string, to: string, roles?: string[] }
 
 export const AREAS: readonly Area[] = [
-  { word: 'Today', to: '/today' },
+  { word: 'Today', to: '/' },
   { word: 'Diary', to: '/diary' },
   { word: 'Jobs', to: '/jobs' },
   { word: 'Countersign', to: '/countersign', roles: ['supervisor'] },
@@ -20,5 +20,5 @@ export function areasFor(roles: readonly string[]): Area[] {
 
 /** Whether a path lies in an area: the area's own page or anything below it. */
 export function isInArea(path: string, area: Area): boolean {
-  return path === area.to || path.startsWith(`${area.to}/`)
+  return path === area.to || (area.to !== '/' && path.startsWith(`${area.to}/`))
 }
