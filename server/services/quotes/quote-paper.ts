@@ -21,6 +21,6 @@ export async function quotePaper(tx: FirmTx, { firmId, jobId, sourceId }: { firm
     rates: total.rates.map(({ vat_bp, net_pence, vat_pence }) => ({ vat_bp, net_pence, vat_pence })),
     net_pence: quote.netPence, vat_pence: quote.vatPence, gross_pence: quote.grossPence, deposit_pence: quote.depositPence, grant_pence: 0,
     terms: quote.terms.split('\n').filter(line => line.trim()),
-    acceptUrl: config().baseUrl,
+    acceptUrl: `${config().baseUrl}/c/quote`,
   })
 }

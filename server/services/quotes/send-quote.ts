@@ -8,6 +8,7 @@ import { recordEvent } from '../../db/queries/events'
 import { lockJob, moveJob, touchJob } from '../../db/queries/jobs'
 import { withdrawLinks } from '../../db/queries/links'
 import { queueMessage } from '../../db/queries/outbox'
+import { queuePaper } from '../../db/queries/papers'
 import { findAddressee, findFirm, findQuotesOfJob, insertQuote, replaceOpenQuotes, takeNumber, type Addressee } from '../../db/queries/quotes'
 import type { FirmContext } from '../firm-context'
 import type { NeededLink } from '../links/customer-links'
@@ -55,8 +56,9 @@ interface QuoteMail { firmId: string, jobId: string, to: Addressee, quote: { id:
 export async function queueQuoteMail(tx: FirmTx, { firmId, jobId, to, quote, reason }: QuoteMail): Promise<void> {
   const days = Math.max(1, daysBetween(londonDay(Date.now()), addDays(quote.expiresOn, DAYS_READABLE_AFTER)))
   const needsLink: NeededLink = { kind: 'customer', purpose: 'quote', subjectId: quote.id, sentTo: to.email, days }
+  const waitsForPaper = await queuePaper(tx, { firmId, jobId, kind: 'quote', sourceId: quote.id })
   await queueMessage(tx, {
-    firmId, jobId, message: 'quote-sent', recipient: to.email, dedupeKey: `quote:${quote.id}:${reason}:${to.email}`,
+    firmId, jobId, waitsForPaper, message: 'quote-sent', recipient: to.email, dedupeKey: `quote:${quote.id}:${reason}:${to.email}`,
     content: { customerName: to.name, shortAddress: to.shortAddress, number: quote.number, gross_pence: quote.grossPence, deposit_pence: quote.depositPence, validUntil: quote.expiresOn, needsLink },
   })
 }

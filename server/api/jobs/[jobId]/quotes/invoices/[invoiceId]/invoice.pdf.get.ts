@@ -1,7 +1,8 @@
-import { renderInvoice } from '#server/services/invoices/render-invoice'
+import { findMadePaper, readMadeFile } from '#server/services/links/read-made-paper'
 
-export default defineJobHandler({ may: 'read-money' }, async ({ event, ctx, job }) => {
-  const { bytes, name } = await renderInvoice(ctx, job.id, uuidParam(event, 'invoiceId'), () => useStorage('assets:fonts'))
-  setResponseHeaders(event, { 'content-type': 'application/pdf', 'content-disposition': `inline; filename="${name}"` })
+export default defineJobHandler({ may: 'read-money' }, async ({ event, ctx }) => {
+  const invoiceId = uuidParam(event, 'invoiceId')
+  const bytes = await readMadeFile(await ctx.read(tx => findMadePaper(tx, ctx.firmId, 'invoice', invoiceId)))
+  setResponseHeaders(event, { 'content-type': 'application/pdf', 'content-disposition': 'inline; filename="invoice.pdf"' })
   return bytes
 })
