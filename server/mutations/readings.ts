@@ -16,10 +16,11 @@ export const addReading: Apply<ReadingPayload> = async (input) => {
   if (!isTranscribed && !mayDo(ctx.person, 'take-readings', job.isOwn)) throw problem('not-allowed', 'Name who measured: you may type in a paper sheet, and the measurer then confirms it.', { fields: { measuredBy: 'Choose who measured' } })
   if (isTranscribed) await assertColleague(input, measuredBy)
   await assertInstrument(input)
-  await tx.insert(reading).values({
+  const kept = await tx.insert(reading).values({
     firmId: ctx.firmId, id: payload.id, jobId: job.id, test: payload.test, kind: payload.kind, shown: payload.shown, value: payload.value, unit: payload.unit, resolution: payload.resolution,
     reason: payload.reason, context: payload.context, instrumentId: payload.instrumentId, personId: measuredBy, typedBy: isTranscribed ? ctx.person.id : null, deviceId: payload.deviceId ?? null, deviceAt: new Date(mutation.at),
-  })
+  }).onConflictDoNothing().returning({ id: reading.id })
+  if (!kept.length) throw problem('check-answers', 'A reading of this id is already kept. Enter the figure again.')
   const page = testSpec(payload.test).page
   return { event: 'reading-added', detail: { readingId: payload.id, test: payload.test }, moves: page === 'supply' ? undefined : 'work-recorded' }
 }

@@ -22,8 +22,8 @@ export async function applyMutation(ctx: FirmContext, mutation: Mutation): Promi
 
 async function applyOnce(tx: FirmTx, ctx: FirmContext, mutation: Mutation): Promise<MutationOutcome> {
   const { id, kind, jobId, payload } = mutation
-  const spec = MUTATION_KINDS[kind]
-  const apply = applierOf(kind)
+  const spec = Object.hasOwn(MUTATION_KINDS, kind) ? MUTATION_KINDS[kind] : undefined
+  const apply = spec && applierOf(kind)
   if (!spec || !apply) throw problem('check-answers', `This application does not know the change "${kind}". Reload the page to get the newest version.`)
 
   const stored = await claimMutation<MutationOutcome>(tx, { firmId: ctx.firmId, id, kind, jobId, personId: ctx.person.id, content: { jobId, payload } })
