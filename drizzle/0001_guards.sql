@@ -93,15 +93,21 @@ begin
   return head.number + 1;
 end $$;
 --> statement-breakpoint
--- The first event of the chain that does not fit, or null where all fit.
+-- The first event of the chain that does not fit, or null where all fit. The head knows the last one, so that rows cut off the end show too.
 create function first_broken_event() returns bigint language sql stable as $$
   with chain as (
     select number, previous_hash, hash, type, job_id, person_id, at, detail,
       lag(hash, 1, '') over (order by number) as before, row_number() over (order by number) as place
-    from audit_event where firm_id = current_firm())
-  select min(number) from chain
-  where number <> place or previous_hash <> before
-    or hash <> encode(sha256(convert_to(previous_hash || '|' || event_text(number, type, job_id, person_id, at, detail), 'UTF8')), 'hex') $$;
+    from audit_event where firm_id = current_firm()),
+  ends as (
+    select coalesce((select max(number) from chain), 0) as last, coalesce((select hash from chain order by number desc limit 1), '') as last_hash,
+      coalesce((select number from audit_head where firm_id = current_firm()), 0) as head, coalesce((select hash from audit_head where firm_id = current_firm()), '') as head_hash)
+  select min(number) from (
+    select number from chain
+    where number <> place or previous_hash <> before
+      or hash <> encode(sha256(convert_to(previous_hash || '|' || event_text(number, type, job_id, person_id, at, detail), 'UTF8')), 'hex')
+    union all
+    select case when head = last then last else least(head, last) + 1 end from ends where head <> last or head_hash <> last_hash) faults $$;
 --> statement-breakpoint
 -- Numbers without gaps: the counter's row stays locked until the transaction that took the number ends.
 create function next_number(p_name text) returns integer language sql as $$
