@@ -1,5 +1,5 @@
 import { findCustomerLink } from '#server/services/links/customer-links'
-import { openDoor } from '#server/services/links/open-door'
+import { openDoor } from '#server/utils/pack-door-cookie'
 import { ProblemError } from '#shared/utils/problem'
 
 /** The postcode as a plain form, for a browser that runs no scripts. */

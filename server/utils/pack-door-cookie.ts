@@ -1,10 +1,10 @@
 import type { H3Event } from 'h3'
 import { getCookie, setCookie } from 'h3'
-import { problem } from '../../../shared/utils/problem'
-import { findAddressee } from '../../db/queries/quotes'
-import { config } from '../../utils/config'
-import { readByLink, type FoundLink } from './customer-links'
-import { countDoorTry, DOOR_HOURS, doorCookieName, isDoorKey, makeDoorKey, samePostcode } from './pack-door'
+import { problem } from '../../shared/utils/problem'
+import { findAddressee } from '../db/queries/quotes'
+import { config } from './config'
+import { readByLink, type FoundLink } from '../services/links/customer-links'
+import { countDoorTry, DOOR_HOURS, doorCookieName, isDoorKey, makeDoorKey, samePostcode } from '../services/links/pack-door'
 
 export const isDoorOpen = (event: H3Event, link: FoundLink) => isDoorKey(config().sessionPassword, link.linkId, getCookie(event, doorCookieName(link.linkId)), Date.now())
 
