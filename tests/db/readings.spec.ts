@@ -38,7 +38,7 @@ describe('a reading', () => {
   it('of an id that is taken changes nothing', async () => {
     const id = randomUUID()
     await add({ id })
-    await expect(add({ id, shown: '0.01', value: 0.01 })).rejects.toThrow()
+    expect(await add({ id, shown: '0.01', value: 0.01 })).toMatchObject(refused('check-answers'))
     expect((await readings()).map(row => row.shown)).toEqual(['0.19'])
   })
 
