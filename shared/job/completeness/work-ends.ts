@@ -2,11 +2,10 @@
 import type { JobRecord } from '../../types/record'
 import { formatAmps } from '../../utils/figures'
 import { contentOf, jobFacts, numberOf, textOf, type JobFacts } from '../judge/facts'
-import type { Judgement } from '../judge/types'
+import type { JobPage, Judgement } from '../judge/types'
 import { INSPECTIONS } from '../inspections.data'
 import { openPutBacks } from '../put-back'
 import { SHOTS, type ShotSpec } from '../shots.data'
-import type { JobPage } from '../judge/types'
 import type { LooseEnd } from './types'
 
 export function putBackEnds(record: JobRecord): LooseEnd[] {

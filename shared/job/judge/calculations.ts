@@ -133,7 +133,15 @@ function circuitAsked(inputs: JobInputs, content: PartContent, { Ib_A, legs, tit
       Ib_A: ref('Ib_A', 'the design current'), In_A: ref('In_A', 'the device\'s rating'), device: ref('device', 'the protective device'), cable: ref('cable', 'the cable'), S_mm2: ref('S_mm2', 'the size of the line conductor'),
       cpc_mm2: ref('cpc_mm2', 'the size of the protective conductor'), phases: ref('phases'), legs: { page: 'cable', field: 'leg', words: 'the legs of the route, each with its way of fixing and its length' },
       Ze_ohm: inputs.survey.earthing === undefined ? survey('earthing', 'the earthing arrangement, or Ze') : readingRef('Ze'),
-      RA_ohm: readingRef('RA'), IdeltaN_A: ref('rcd_IdeltaN_mA', 'the rated residual current'),
+      ...legRefs(inputs.legKeys), RA_ohm: readingRef('RA'), IdeltaN_A: ref('rcd_IdeltaN_mA', 'the rated residual current'),
     },
   }
+}
+
+/** Leads from a leg's missing figure to that leg. */
+function legRefs(keys: readonly string[]): Asked['from'] {
+  return Object.fromEntries(keys.flatMap((key, index) => [
+    [`legs.${index}.method`, fieldRef('leg', key, 'method', `the way of fixing of leg ${index + 1}`)],
+    [`legs.${index}.L_m`, fieldRef('leg', key, 'L_m', `the length of leg ${index + 1}`)],
+  ]))
 }

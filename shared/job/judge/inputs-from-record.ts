@@ -36,6 +36,8 @@ export interface JobInputs {
   loadLimit_A: number | undefined
   limiterTested: boolean
   legs: Record<string, unknown>[]
+  /** The key of each leg's row, in the same order. */
+  legKeys: string[]
   /** The length as fitted, where it was measured. */
   fitted_m: number | undefined
   designed_m: number | undefined
@@ -69,6 +71,7 @@ export function jobInputs(record: JobRecord, counted: Record<TestKey, TestReadin
     IdeltaN_A: rcd_mA === undefined ? undefined : rcd_mA / 1000,
     ...limiterInputs(limit, counted),
     legs,
+    legKeys: legRows(record).map(row => row.key),
     fitted_m: fittedLength(installed),
     designed_m: lengths.length && lengths.length === legs.length ? lengths.reduce((sum, each) => sum + each, 0) : undefined,
   }
@@ -111,10 +114,11 @@ function limiterInputs(limit: PartContent, counted: Record<TestKey, TestReadings
   }
 }
 
+const legRows = (record: JobRecord) => [...record.parts.leg].sort((a, b) => a.position - b.position)
+
 function legInputs(record: JobRecord): Record<string, unknown>[] {
   const keys = ['method', 'L_m', 'ambient_C', 'ground_C', 'circuits', 'arrangement', 'insulationLength_mm', 'depth_m', 'rho_Km_per_W']
-  const rows = [...record.parts.leg].sort((a, b) => a.position - b.position)
-  return rows.map(({ content }) => Object.fromEntries(keys.flatMap(key => content[key] === null || content[key] === undefined ? [] : [[key, content[key]]])))
+  return legRows(record).map(({ content }) => Object.fromEntries(keys.flatMap(key => content[key] === null || content[key] === undefined ? [] : [[key, content[key]]])))
 }
 
 /** The run as fitted: in metres, or from the marks on the cable's sheath. */

@@ -14,12 +14,29 @@ export interface Asked {
 
 export function judged<I, R>(calculation: Calculation<I, R>, { title, input, from }: Asked): Judged<R> {
   const given = withoutBlanks(input)
+  const answer = answerOf(calculation, given)
+  return { name: calculation.name, title, input: given, answer, waitsFor: waitsFor(answer.missing, from) }
+}
+
+/**
+ * Answers given lately, by the question. A job is judged again on every keystroke, and one key changes one figure: all
+ * other questions were just asked. The same question always has the same answer, so keeping it changes nothing but the time.
+ */
+const lately = new Map<string, Answer<unknown>>()
+const MOST_KEPT = 400
+
+function answerOf<I, R>(calculation: Calculation<I, R>, given: Record<string, unknown>): Answer<R> {
+  const question = `${calculation.name} ${JSON.stringify(given)}`
+  const kept = lately.get(question)
+  if (kept) return kept as Answer<R>
   const reply = runCalculation(calculation, given)
   // Figures that cannot be put together (a method the cable's table has not) are to be changed: until then nobody can tell.
   const answer: Answer<R> = isCalculationProblem(reply)
     ? waiting(reply.error.issues.map(issue => issue.path), { reasons: reply.error.issues.map(issue => issue.message) })
     : reply
-  return { name: calculation.name, title, input: given, answer, waitsFor: waitsFor(answer.missing, from) }
+  if (lately.size >= MOST_KEPT) lately.clear()
+  lately.set(question, answer)
+  return answer
 }
 
 export function withoutBlanks(input: Record<string, unknown>): Record<string, unknown> {

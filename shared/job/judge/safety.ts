@@ -23,7 +23,8 @@ function sheetFigure(id: string, label: string, sheet: Judged<unknown>, page: Sa
   const { answer, waitsFor } = sheet
   const verdict: Verdict = answer.verdict ?? 'waiting'
   const [first] = waitsFor
-  const why = verdict === 'waiting' && waitsFor.length ? `Needs ${listWords(waitsFor)}.` : answer.reasons.join(' ')
+  const needs = verdict === 'waiting' && waitsFor.length ? [`Needs ${listWords(waitsFor)}.`] : []
+  const why = [...needs, ...answer.reasons].join(' ')
   return { id, label, verdict, sentence: sentence(label, verdict, why), page: verdict === 'waiting' && first ? first.page : page, field: verdict === 'waiting' && first ? first.field : field }
 }
 

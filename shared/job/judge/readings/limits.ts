@@ -5,8 +5,12 @@ import type { ReadingExpected, ReadingLimit } from '../types'
 /** Forgives the dust of binary fractions, nothing larger. */
 const DUST = 1e-9
 
+/** From here on places after the point say nothing. */
+const LARGE = 100
+
 /** The most it may be; printed rounded down, so that the printed limit never allows more than the true one. */
-export function most(value: number, unit: string, decimals: number): ReadingLimit {
+export function most(value: number, unit: string, places: number): ReadingLimit {
+  const decimals = value >= LARGE || Number.isInteger(value) && places === 1 ? 0 : places
   const factor = 10 ** decimals
   return { value, is: 'most', text: `≤ ${formatFigure(Math.floor(value * factor + DUST) / factor, unit, decimals)}` }
 }
