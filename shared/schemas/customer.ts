@@ -48,7 +48,7 @@ export interface CustomerQuote {
   terms: string
   acceptedAt: string | null
   acceptedName: string | null
-  /** Whether a card payment can be asked for. */
+  /** Whether the deposit can be paid by card, now or right after accepting. */
   canPay: boolean
 }
 

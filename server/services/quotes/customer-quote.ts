@@ -46,7 +46,7 @@ export async function readCustomerQuote(link: FoundLink, takesCards: boolean): P
       terms: quote.terms,
       acceptedAt: quote.acceptedAt?.toISOString() ?? null,
       acceptedName: quote.acceptedName,
-      canPay: takesCards && state === 'accepted' && quote.depositPence - paidPence > 0,
+      canPay: takesCards && (state === 'open' || state === 'accepted') && quote.depositPence - paidPence > 0,
     }
   })
 }
