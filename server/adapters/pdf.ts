@@ -1,5 +1,6 @@
 import pdfmake from 'pdfmake'
 import type { TDocumentDefinitions } from 'pdfmake/interfaces'
+import { plainFace } from './pdf/plain-face'
 
 /** The two faces of paper as TTF bytes. (Web fonts cannot be cut down to a subset here, and lack ≤ ≥ √.) */
 export interface PaperFonts { regular: Uint8Array, bold: Uint8Array }
@@ -38,8 +39,8 @@ export async function warmUpPdf(fonts: PaperFonts): Promise<void> {
 
 function useFonts(fonts: PaperFonts): void {
   if (shelved?.regular === fonts.regular && shelved.bold === fonts.bold) return
-  shelf.writeFileSync(REGULAR, Buffer.from(fonts.regular))
-  shelf.writeFileSync(BOLD, Buffer.from(fonts.bold))
+  shelf.writeFileSync(REGULAR, plainFace(fonts.regular))
+  shelf.writeFileSync(BOLD, plainFace(fonts.bold))
   // Nothing is fetched and nothing is read from disk while a paper is made, whatever its content says.
   pdfmake.setUrlAccessPolicy(() => false)
   pdfmake.setLocalAccessPolicy(() => false)

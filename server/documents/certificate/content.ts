@@ -40,7 +40,7 @@ const CAPACITY_WORDS: Record<Capacity, string> = {
   'checked-for-the-firm': 'Checked for the firm',
 }
 
-const WAY_WORDS: Record<Signature['way'], string> = { passkey: 'by passkey', typed: 'by typed name', drawn: 'drawn by hand' }
+const WAY_WORDS: Record<Signature['way'], string> = { passkey: 'by passkey', typed: 'by typed name', drawn: 'by a drawn signature' }
 
 /** A record in the words and rows of its certificate. */
 export function certificateContent(record: CertificateRecord, seal: PaperSeal | null): CertificateContent {

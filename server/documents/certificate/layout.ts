@@ -1,14 +1,20 @@
 import type { Content, TDocumentDefinitions } from 'pdfmake/interfaces'
 import type { CertificateRecord } from '#shared/schemas/sealed-record'
+import { inspectionsContent } from '../inspections/content'
+import { inspectionsPages } from '../inspections/layout'
 import { definePaper } from '../paper/define-paper'
 import { note, openingBlock, section, sentence } from '../paper/opening'
-import { footOf, PAPER_KINDS, type PaperSeal } from '../paper/record-paper'
+import { footOf, PAPER_KINDS, recordFile, type PaperSeal } from '../paper/record-paper'
 import { factTable, listTable, NO_UPRIGHTS, ROWS } from '../paper/tables'
 import { SIZE, TABLE_LINE } from '../paper/tokens'
+import { testResultsContent } from '../test-results/content'
+import { testResultsPages } from '../test-results/layout'
 import { certificateContent, type CertificateContent, type SignatureContent } from './content'
 
-/** The certificate by itself, without its schedules. */
+/** The certificate with its schedules, as it is issued; the sealed record travels inside. */
 export function certificateDefinition(record: CertificateRecord, seal: PaperSeal | null): TDocumentDefinitions {
+  const next = { first: false }
+  const schedules = record.kind === 'installation' ? [...inspectionsPages(inspectionsContent(record, seal), next), ...testResultsPages(testResultsContent(record, seal), next)] : []
   return definePaper({
     title: `${PAPER_KINDS[record.kind]}, ${record.installation.shortAddress}`,
     firm: record.firm.name,
@@ -16,7 +22,8 @@ export function certificateDefinition(record: CertificateRecord, seal: PaperSeal
     foot: footOf(record, seal),
     isDraft: seal === null,
     at: record.certificate.at,
-    pages: certificatePages(certificateContent(record, seal), { first: true }),
+    pages: [...certificatePages(certificateContent(record, seal), { first: true }), ...schedules],
+    ...(seal && { attached: [recordFile(record)] }),
   })
 }
 

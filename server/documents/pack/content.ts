@@ -1,4 +1,3 @@
-import { canonicalText } from '#shared/seal/canonical-text'
 import type { CertificateRecord } from '#shared/schemas/sealed-record'
 import { certificateContent, type CertificateContent } from '../certificate/content'
 import { inspectionsContent, type InspectionsContent } from '../inspections/content'
@@ -33,8 +32,6 @@ export interface PackContent {
   working: WorkingContent | null
   photographs: { opening: OpeningContent, shots: PackPhotograph[] } | null
   last: string[]
-  /** The record itself, to be carried inside the file: the very bytes that the hash is of. */
-  recordText: string
 }
 
 /** Everything a customer gets, in the order in which it is read: plain words first, proof behind. */
@@ -52,6 +49,5 @@ export function packContent({ record, seal, liveWith, auditHead, photographs, to
       ...(told.length ? told : ['Nobody outside has been told yet.']),
       auditHead ? `Head of the firm’s record of events when this pack was made: ${auditHead}` : 'Head of the firm’s record of events: none yet.',
     ],
-    recordText: canonicalText(record),
   }
 }

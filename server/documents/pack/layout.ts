@@ -3,7 +3,7 @@ import { certificatePages } from '../certificate/layout'
 import { inspectionsPages } from '../inspections/layout'
 import { definePaper } from '../paper/define-paper'
 import { note, openingBlock, section } from '../paper/opening'
-import { footOf } from '../paper/record-paper'
+import { footOf, recordFile } from '../paper/record-paper'
 import { PORTRAIT_WIDTH, SIZE } from '../paper/tokens'
 import { liveWithItPages, proveItPages } from '../plain-words/layout'
 import { testResultsPages } from '../test-results/layout'
@@ -22,7 +22,7 @@ export function packDefinition(input: PackInput): TDocumentDefinitions {
     isDraft: seal === null,
     at: record.certificate.at,
     pages: packPages(content),
-    ...(seal && { attached: [{ name: `${record.certificate.number}-${record.certificate.revision}.json`, text: content.recordText, description: 'The sealed record: the hash is the SHA-256 of these bytes' }] }),
+    ...(seal && { attached: [recordFile(record)] }),
   })
 }
 

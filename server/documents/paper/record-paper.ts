@@ -1,4 +1,5 @@
 import type { CertificateRecord } from '#shared/schemas/sealed-record'
+import { canonicalText } from '#shared/seal/canonical-text'
 import { fourWords } from '#shared/seal/four-words'
 import { formatMoment } from '#shared/utils/dates'
 import type { FootContent } from './foot'
@@ -39,4 +40,9 @@ export function openingOf(record: CertificateRecord, seal: PaperSeal | null, tit
     qr: more.withCode && seal ? seal.checkUrl : null,
     qrWords: more.withCode && seal ? `Check: ${seal.checkUrl}  ·  ${wordsOf(seal)}` : null,
   }
+}
+
+/** The record as a file inside its own paper: the very bytes that the hash is of. */
+export function recordFile(record: CertificateRecord): { name: string, text: string, description: string } {
+  return { name: `${record.certificate.number}-${record.certificate.revision}.json`, text: canonicalText(record), description: 'The sealed record: the hash is the SHA-256 of these bytes' }
 }

@@ -54,7 +54,7 @@ describe('an installation certificate', () => {
   })
 
   it('says that one person signed for the three, how, when and to which edition', () => {
-    expect(content.signatures[0]).toMatchObject({ capacities: 'Design · Construction · Inspection and test', name: 'R. Invented', signed: 'Signed drawn by hand on Tue 2 Mar 2027, 15:40, to BS 7671:2018+A4:2026', firm: expect.stringContaining('telephone 01632 960123') })
+    expect(content.signatures[0]).toMatchObject({ capacities: 'Design · Construction · Inspection and test', name: 'R. Invented', signed: 'Signed by a drawn signature on Tue 2 Mar 2027, 15:40, to BS 7671:2018+A4:2026', firm: expect.stringContaining('telephone 01632 960123') })
     expect(content.signatures[1]?.capacities).toBe('Checked for the firm')
     expect(content.signatureNotes).toContain('One person designed, built, inspected and tested this work: one signature stands for the three declarations.')
   })
