@@ -1,7 +1,7 @@
 import type { LooseEnd } from '#shared/job/completeness'
 
 /** Inspections are answered where one signs, whatever part of the house they look at. */
-const ON_LEAVE = /^(inspection|departure|statement|unexpected)\./
+const ON_LEAVE = /^inspection\./
 
 /** The page and field that a loose end leads to: `/jobs/<id>/supply#survey.survey.cutout_A`. */
 export function looseEndLink(jobId: string, end: Pick<LooseEnd, 'page' | 'field'>): string {
