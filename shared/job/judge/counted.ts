@@ -24,7 +24,7 @@ export function countReadings(record: JobRecord): Record<TestKey, TestReadings> 
 }
 
 function sortOut(rows: ReadingRow[], instruments: ReadonlyMap<string, InstrumentRow>): TestReadings {
-  const inOrder = [...rows].sort((a, b) => Date.parse(a.deviceAt) - Date.parse(b.deviceAt) || Date.parse(a.serverAt) - Date.parse(b.serverAt))
+  const inOrder = [...rows].sort((a, b) => Date.parse(a.deviceAt) - Date.parse(b.deviceAt) || Date.parse(a.serverAt) - Date.parse(b.serverAt) || 0)
   const judged = inOrder.map(reading => ({ reading, notCounted: whyNotCounted(reading, instruments) }))
   const last = judged.findLastIndex(each => each.notCounted === null)
   return {

@@ -102,7 +102,7 @@ function insulationPart(input: AssembleInput): TestedCircuit['insulation'] {
   const test_V = counted?.context.testVoltage_V ?? INSULATION_TEST_V.cable
   const connected = input.judgement.readings['IR-charger']
   return {
-    voltage: counted ? textField(formatNumber(test_V), { value: test_V, unit: 'V', howKnown: 'set' }) : notEntered(),
+    voltage: counted ? textField(formatNumber(test_V), { value: test_V, unit: 'V', howKnown: counted.context.testVoltage_V === undefined ? 'as the test asks' : 'set' }) : notEntered(),
     lineToLine: reading(input, 'IR-line-line'),
     lineToEarth: reading(input, 'IR-live-earth'),
     neutralToEarth: reading(input, 'IR-neutral-earth'),
