@@ -87,5 +87,5 @@ describe('other papers', () => {
     const defaultStyle = { font: 'Inter' }
     await expect(renderPdf({ info, defaultStyle, content: { image: '/etc/hostname' } }, fonts)).rejects.toThrow('denied')
     await expect(renderPdf({ info, defaultStyle, images: { a: 'http://127.0.0.1:9/a.png' }, content: { image: 'a' } }, fonts)).rejects.toThrow('denied')
-  })
+  }, 60_000)
 })
