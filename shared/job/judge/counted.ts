@@ -24,8 +24,8 @@ export function countReadings(record: JobRecord): Record<TestKey, TestReadings> 
 }
 
 function sortOut(rows: ReadingRow[], instruments: ReadonlyMap<string, InstrumentRow>): TestReadings {
-  const inOrder = [...rows].sort((a, b) => Date.parse(a.deviceAt) - Date.parse(b.deviceAt) || Date.parse(a.serverAt) - Date.parse(b.serverAt) || 0)
-  const judged = inOrder.map(reading => ({ reading, notCounted: whyNotCounted(reading, instruments) }))
+  // The record lists readings in the order the server took them, the device's own newest last: never by a tablet's clock.
+  const judged = rows.map(reading => ({ reading, notCounted: whyNotCounted(reading, instruments) }))
   const last = judged.findLastIndex(each => each.notCounted === null)
   return {
     counted: judged[last]?.reading ?? null,
