@@ -1,6 +1,7 @@
 /** The acts of a demo job in one line each, every one through the product's own services as the person who would do it. */
 import { randomUUID } from 'node:crypto'
 import { eq } from 'drizzle-orm'
+import { demoPhotographs } from './photographs.mjs'
 
 const CREW_OF = { installer: 'A', grace: 'B', owen: 'B' }
 
@@ -15,21 +16,31 @@ export function demoActs({ services, firm, clock, random }) {
     return outcome
   }
 
+  async function enquire(name, { since, customer, premises, wanted, note, about }) {
+    const { rating_kW, phases, outlet, ...wishes } = wanted
+    const mpan = premises.mpan && `${premises.mpan}${services.mpanCheckDigit(premises.mpan)}`
+    const made = await services.addJob(firm.people.office, { mutationId: randomUUID(), customer, premises: { ...premises, mpan }, wanted: { rating_kW, phases, outlet }, note })
+    const job = { name, since, changed: since, customer, ...made }
+    const at = clock.at(-since, '09:10')
+    await acts.change('office', job, 'wanted', 'wanted', wishes, { at })
+    await send('office', job, 'change-premises', { fields: about }, { at })
+    return job
+  }
+
   const acts = {
     jobs, clock, firm, random, services,
 
-    /** Takes an enquiry; `name` is the demo's own name for the situation. `since` is how many days ago it came. */
-    async enquire(name, home, since) {
-      const { wanted = {}, ...rest } = home
-      const { rating_kW, phases, outlet, ...wishes } = wanted
-      const asked = { mutationId: randomUUID(), customer: rest.customer, premises: rest.premises, wanted: { rating_kW, phases, outlet }, note: rest.note ?? '' }
-      const job = { name, since, changed: since, ...await services.addJob(firm.people.office, asked) }
-      jobs.push(job)
-      const at = clock.at(-since, '09:10')
-      if (Object.keys(wishes).length) await acts.change('office', job, 'wanted', 'wanted', wishes, { at })
-      if (rest.about) await send('office', job, 'change-premises', { fields: rest.about }, { at })
-      return job
+    /** Takes the pictures of those claims of the shot list. */
+    photograph: demoPhotographs({ services, firm }, send),
+
+    /** Takes every enquiry, the oldest first, so that numbers run with the days. */
+    async enquireAll(homes) {
+      const inOrder = Object.entries(homes).sort(([, one], [, other]) => other.since - one.since)
+      for (const [name, home] of inOrder) jobs.push(await enquire(name, home))
     },
+
+    /** The job of that situation. */
+    job: name => jobs.find(job => job.name === name),
 
     /** Books a visit on a working day about `offset` days from today. */
     async book(job, kind, offset, half, crew, rest = {}) {

@@ -1,14 +1,7 @@
 /** Steps that jobs of several states go through: survey answers, the house's demand, the design. */
 import { APPLIANCES, RECORDED, SURVEYS } from './surveys.data.mjs'
 import { DESIGNS } from './designs.data.mjs'
-
-const FIRST_DIGITS = 12
-
-/** The lower line of a supply number: twelve round digits and the check digit that belongs to them. */
-export function withMpan(home, { mpanCheckDigit }) {
-  const { mpan } = home.premises
-  return mpan.length === FIRST_DIGITS ? { ...home, premises: { ...home.premises, mpan: `${mpan}${mpanCheckDigit(mpan)}` } } : home
-}
+import { SURVEY_SHOTS } from './photographs.mjs'
 
 async function answerDemand(acts, who, job, demand, at) {
   for (const [position, [key, fields]] of (APPLIANCES[demand] ?? []).entries()) await acts.change(who, job, 'appliance', key, fields, { at, position })
@@ -16,12 +9,13 @@ async function answerDemand(acts, who, job, demand, at) {
 }
 
 /** Answers the whole survey on the day it was booked for, and closes that visit. */
-export async function answerSurvey(acts, job, { survey, demand, crew = 'A', daysAgo }) {
+export async function answerSurvey(acts, job, { survey, demand, crew = 'A', daysAgo, shots = SURVEY_SHOTS }) {
   const who = crew === 'A' ? 'installer' : 'grace'
   const visit = await acts.book(job, 'survey', -daysAgo, 'am', crew)
   const at = acts.clock.at(-daysAgo, '10:20')
   await acts.change(who, job, 'survey', 'survey', SURVEYS[survey], { at })
   await answerDemand(acts, who, job, demand, at)
+  await acts.photograph(who, job, shots, at)
   await acts.closeVisit(visit)
   await acts.finishSurvey(job)
   job.changed = daysAgo

@@ -1,5 +1,6 @@
 /** What is done on the day: what was fitted, the tests in meter order, and all that is put back. */
 import { DESIGNS } from './designs.data.mjs'
+import { LIMITER_SHOTS, WORK_SHOTS } from './photographs.mjs'
 
 /** Readings of a sound job, by the length and size of its cable; what differs is given by the state that needs it. */
 const ORDINARY = {
@@ -31,11 +32,11 @@ export const readLive = (acts, who, job, figures, at, { limiter = false, ...rest
 
 /** The charger, the isolator, the cable as it was really run. */
 export async function fit(acts, who, job, design, { at, serial, limiter = false }) {
-  const { legs } = DESIGNS[design]
+  const { circuit, legs } = DESIGNS[design]
   const length = legs.reduce((sum, [, leg]) => sum + leg.L_m, 0)
   await acts.change(who, job, 'equipment', 'charger', { description: 'Wall charger, 7.4 kW, single-phase', standard: 'BS EN IEC 61851-1', rating_A: 32, serial, serial_again: serial, firmware: '4.2.1', location: 'Side wall beside the drive', height_m: 1, labels: 'yes' }, { at })
   await acts.change(who, job, 'equipment', 'isolator', { description: 'Double-pole isolator', standard: 'BS EN 60947-3', rating_A: 40, location: 'Beside the charger', labels: 'yes' }, { at })
-  await acts.change(who, job, 'circuit', 'installed', { L_m: length, start_mark_m: 214, end_mark_m: 214 + length }, { at })
+  await acts.change(who, job, 'circuit', 'installed', { ...circuit, L_m: length, start_mark_m: 214, end_mark_m: 214 + length }, { at })
   if (limiter) await acts.change(who, job, 'loadLimit', 'limit', { state: 'fitted', set_A: 60, set_where: 'app', ct_checked: 'yes', fails_safe: 'yes', seen: 'Kettle, oven and hob on: the charge fell to 9 A and came back.' }, { at })
 }
 
@@ -47,6 +48,7 @@ export async function putBack(acts, who, job, at, before) {
 
 /** The schedule of inspections, as a job without odd parts answers it, and the statement of the work. */
 export async function inspectAndState(acts, who, job, at, { limiter = false } = {}) {
+  await acts.photograph(who, job, limiter ? [...WORK_SHOTS, ...LIMITER_SHOTS] : WORK_SHOTS, at)
   const absent = { 'no-other-sources': true, 'no-limiter': !limiter, 'no-open-PEN': false }
   for (const { key, notApplicableReason, notApplicableWhen } of acts.services.INSPECTIONS) {
     const isAbsent = notApplicableReason !== null && (notApplicableWhen === undefined || absent[notApplicableWhen])

@@ -1,14 +1,11 @@
-import { HOMES } from '../homes.data.mjs'
-import { withMpan } from '../steps.mjs'
-
 /** Three surveys to come: today, soon and next week. */
 export async function surveyBooked(acts) {
-  const take = async (name, since, offset, half, crew) => {
-    const job = await acts.enquire(name, withMpan(HOMES[name], acts.services), since)
+  const take = async (name, offset, half, crew) => {
+    const job = acts.job(name)
     await acts.book(job, 'survey', offset, half, crew)
-    job.changed = Math.max(since - 1, 0)
+    job.changed = job.since - 1
   }
-  await take('surveyToday', 5, 0, 'pm', 'A')
-  await take('surveySoon', 4, 2, 'am', 'B')
-  await take('surveyNextWeek', 3, 7, 'pm', 'A')
+  await take('surveyToday', 0, 'pm', 'A')
+  await take('surveySoon', 2, 'am', 'B')
+  await take('surveyNextWeek', 7, 'pm', 'A')
 }
