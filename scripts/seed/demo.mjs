@@ -18,7 +18,7 @@ const STATES = [sealed, withSupervisor, readyToSign, onSite, installBooked, mone
 
 /**
  * Makes the invented firm and its jobs.
- * @param {{ services: object, owner: import('pg').Client, now: string, domain?: string }} given `domain` ends the people's e-mail addresses
+ * @param {{ services: object, owner: import('pg').ClientBase, now: string, domain?: string }} given `domain` ends the people's e-mail addresses
  */
 export async function seedDemo({ services, owner, now, domain = DEMO_DOMAIN }) {
   const clock = demoClock(now, services)
