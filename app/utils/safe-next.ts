@@ -6,5 +6,6 @@ export function safeNext(next: unknown): string {
   if (typeof next !== 'string' || !next.startsWith('/') || /^\/[/\\]/.test(next) || /[\u0000-\u001F\\]/.test(next)) return '/'
   const here = 'https://here.invalid'
   const url = URL.canParse(next, here) ? new URL(next, here) : null
-  return url?.origin === here ? url.pathname + url.search + url.hash : '/'
+  // Dots in the path are resolved by now, and must not have left two strokes at its start.
+  return url?.origin === here && !url.pathname.startsWith('//') ? url.pathname + url.search + url.hash : '/'
 }

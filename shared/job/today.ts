@@ -30,7 +30,7 @@ export interface WaitingThing {
   detail: string
 }
 
-export interface OnSiteRow { jobId: string, crew: string, address: string, postcode: string, kind: string, stage: string, readings: number, lastAt: string | null }
+export interface OnSiteRow { jobId: string, crew: string, address: string, postcode: string, kind: string, day: Day, readings: number, lastAt: string | null }
 export interface ComingRow { visitId: string, jobId: string, day: Day, half: 'am' | 'pm', crew: string, kind: string, customer: string, address: string, postcode: string }
 export interface TodayView { waiting: WaitingThing[], onSite: OnSiteRow[], coming: ComingRow[] }
 
@@ -71,8 +71,12 @@ export function sayWaiting(thing: WaitingThing, today: Day): string {
   }
 }
 
-/** A recipient within a sentence: "network operator", but "SP Energy Networks" as it is. */
-const lower = (words: string) => /^[A-Z][a-z]+ [a-z]/.test(words) || /^[A-Z][a-z]+,/.test(words) ? `the ${words[0]!.toLowerCase()}${words.slice(1)}` : words
+/** A recipient within a sentence: "the network operator", "building control", but a name as it is. */
+function lower(words: string): string {
+  if (!/^[A-Z][a-z]+(?:,| [a-z])/.test(words)) return words
+  const small = words[0]!.toLowerCase() + words.slice(1)
+  return /^(?:network operator|grant body)/.test(small) ? `the ${small}` : small
+}
 
 function sayVisit(thing: WaitingThing, today: Day): string {
   const [kind = '', half = 'am'] = thing.detail.split(' ')
@@ -108,7 +112,7 @@ export function toWaitingRow(thing: WaitingThing, today: Day): WaitingRow {
   const old = thing.since ? Math.max(0, workingDaysBetween(londonDay(thing.since), today, thing.country)) : 0
   const isLate = isDated && left !== null && (left < 0 || daysBetween(thing.due!, today) > 0)
   const isNear = thing.kind === 'visit' ? thing.due === today : isDated && left !== null && left <= NEAR_DAYS
-  const age = isDated ? sayLeft(left!, isLate) : thing.kind === 'visit' ? '' : `${old} wd`
+  const age = isDated ? sayLeft(left!, isLate) : thing.kind === 'visit' ? '' : old === 0 ? 'today' : `${old} wd`
   return {
     key: `${thing.kind}-${thing.id}`,
     sentence: sayWaiting(thing, today),

@@ -55,7 +55,7 @@ function waitingFor(firmId: string, { id: personId, roles, crewId }: Reader, tod
 }
 
 /** Today's visits and whatever else stands at "On site", with how far the readings are. */
-const onSite = (firmId: string, today: string) => sql`select distinct on (h.id) h.id as "jobId", c.name as crew, h.address, h.postcode, v.kind, h.stage,
+const onSite = (firmId: string, today: string) => sql`select distinct on (h.id) h.id as "jobId", c.name as crew, h.address, h.postcode, v.kind, v.day,
     (select count(*) from reading r where r.firm_id = ${firmId} and r.job_id = h.id)::int as readings, (select max(r.server_at) from reading r where r.firm_id = ${firmId} and r.job_id = h.id) as "lastAt"
   from here h join visit v on v.firm_id = ${firmId} and v.job_id = h.id and v.state = 'booked' and v.removed_at is null and v.day <= ${today}::date join crew c on c.firm_id = v.firm_id and c.id = v.crew_id
   where v.day = ${today}::date or h.stage = 'on-site' order by h.id, v.day desc, v.half`
