@@ -4,5 +4,5 @@ import { readPack } from '#server/services/links/read-pack'
 
 export default defineOpenHandler({}, async ({ event }) => {
   const link = await findCustomerLink(getRouterParam(event, 'token') ?? '', 'pack')
-  return readPack(link, isDoorOpen(event, link))
+  return readPack(link, isDoorOpen(link, name => getCookie(event, name)))
 })

@@ -5,7 +5,7 @@ import { findStandingCertificate } from '#server/services/links/read-pack'
 
 export default defineOpenHandler({}, async ({ event }) => {
   const link = await findCustomerLink(getRouterParam(event, 'token') ?? '', 'pack')
-  assertDoorOpen(event, link)
+  assertDoorOpen(link, name => getCookie(event, name))
   const bytes = await readMadeFile(await readByLink(link, async (tx) => {
     const row = await findStandingCertificate(tx, link.firmId, link.jobId)
     return row && findMadePaper(tx, link.firmId, 'pack', row.id)

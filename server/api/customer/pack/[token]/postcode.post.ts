@@ -1,8 +1,9 @@
 import { postcodeForm } from '#shared/schemas/customer'
 import { findCustomerLink } from '#server/services/links/customer-links'
-import { openDoor } from '#server/utils/pack-door-cookie'
+import { openDoor } from '#server/services/links/open-door'
 
 export default defineOpenHandler({ body: postcodeForm }, async ({ event, body }) => {
-  await openDoor(event, await findCustomerLink(getRouterParam(event, 'token') ?? '', 'pack'), body.postcode)
+  const { name, value, options } = await openDoor(await findCustomerLink(getRouterParam(event, 'token') ?? '', 'pack'), body.postcode)
+  setCookie(event, name, value, options)
   return { open: true }
 })

@@ -5,6 +5,6 @@ import { askFirm } from '#server/services/quotes/customer-acts'
 
 export default defineOpenHandler({ body: askForm }, async ({ event, body }) => {
   const link = await findCustomerLink(getRouterParam(event, 'token') ?? '', 'pack')
-  assertDoorOpen(event, link)
+  assertDoorOpen(link, name => getCookie(event, name))
   return askFirm(link, body)
 })
