@@ -31,6 +31,7 @@ export default defineNuxtConfig({
   },
   nitro: {
     compressPublicAssets: { gzip: true, brotli: true },
+    esbuild: { options: { target: 'es2022' } },
     serverAssets: [{ baseName: 'fonts', dir: here('./server/assets/fonts') }],
   },
   security: {
