@@ -86,3 +86,7 @@ export type CustomerPack
       told: string[]
       hasPdf: boolean
     }
+
+export interface CustomerShots { firmName: string, firmTelephone: string, address: string, slots: { claim: string, label: string, visible: string, held: number }[] }
+
+export interface CustomerVisit { firmName: string, firmTelephone: string, address: string, kind: string, day: string, half: string, state: string }
