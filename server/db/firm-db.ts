@@ -6,6 +6,7 @@ import { drizzle } from 'drizzle-orm/node-postgres'
 import type { NodePgDatabase } from 'drizzle-orm/node-postgres'
 import type pg from 'pg'
 import { databasePool } from './pool'
+import { asRefusal } from './unkeepable'
 
 declare const firmTag: unique symbol
 export type FirmTx = NodePgDatabase & { readonly [firmTag]: true }
@@ -31,7 +32,7 @@ async function inTransaction<T>(firmId: string, mode: 'read only' | 'read write'
     await client.query('rollback').catch((lost: Error) => {
       broken = lost
     })
-    throw error
+    throw asRefusal(error)
   }
   finally {
     client.release(broken)
@@ -43,6 +44,8 @@ export const changeAsFirm = <T>(firmId: string, act: (tx: FirmTx) => Promise<T>)
 
 /** One statement outside any firm: only for the look-up functions that come before the firm is known, and for `job_page`. */
 export async function lookUp<Row extends pg.QueryResultRow>(name: string, text: string, values: unknown[]): Promise<Row[]> {
-  const { rows } = await databasePool().query<Row>({ name, text, values })
+  const { rows } = await databasePool().query<Row>({ name, text, values }).catch((error: unknown) => {
+    throw asRefusal(error)
+  })
   return rows
 }

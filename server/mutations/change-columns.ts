@@ -19,6 +19,6 @@ export const changePremises: Apply<ColumnChange> = async ({ tx, ctx, job, payloa
 }
 
 export const changeJob: Apply<ColumnChange> = async ({ tx, ctx, job, payload }) => {
-  await tx.update(jobTable).set(payload.fields).where(and(eq(jobTable.firmId, ctx.firmId), eq(jobTable.id, job.id)))
+  await tx.update(jobTable).set({ ...payload.fields, changedAt: sql`now()` }).where(and(eq(jobTable.firmId, ctx.firmId), eq(jobTable.id, job.id)))
   return { event: 'record-changed', detail: { part: 'job', fields: Object.keys(payload.fields) } }
 }

@@ -16,7 +16,7 @@ export async function changePerson(ctx: FirmContext, personId: string, input: Pe
     if (personId === ctx.person.id && changes.active === false) throw problem('check-answers', 'You cannot switch yourself off. Another principal can.')
     if (!(after.active && after.roles.includes('principal')) && !await countOtherPrincipals(tx, ctx.firmId, personId)) throw problem('check-answers', 'The firm needs at least one principal who can sign in. Give somebody else that role first.', { fields: { roles: 'The firm needs at least one principal' } })
     if (changes.crewId && !(await tx.select({ id: crew.id }).from(crew).where(and(eq(crew.firmId, ctx.firmId), eq(crew.id, changes.crewId)))).length) throw problem('check-answers', 'Choose one of the firm\'s crews.', { fields: { crewId: 'Choose a crew' } })
-    await tx.update(membership).set(changes).where(and(eq(membership.firmId, ctx.firmId), eq(membership.personId, personId)))
+    await tx.update(membership).set({ active: after.active, ...changes }).where(and(eq(membership.firmId, ctx.firmId), eq(membership.personId, personId)))
     const mustSignInAgain = changes.active === false || (changes.roles !== undefined && personId !== ctx.person.id)
     if (mustSignInAgain) await tx.update(signInSession).set({ revokedAt: sql`now()` }).where(and(eq(signInSession.firmId, ctx.firmId), eq(signInSession.personId, personId), isNull(signInSession.revokedAt)))
     await recordEvent(tx, { type: 'person-changed', personId: ctx.person.id, detail: { changed: personId, was: { roles: before.roles, crewId: before.crewId, active: before.active }, now: changes } })

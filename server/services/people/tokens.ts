@@ -8,7 +8,7 @@ import { changeAsFirm, lookUp, type FirmTx } from '../../db/firm-db'
 import { recordEvent } from '../../db/queries/events'
 import { queueMessage } from '../../db/queries/outbox'
 import { outboxMessage } from '../../db/schema/message'
-import { membership, person, personToken, signInSession } from '../../db/schema/firm'
+import { crew, membership, person, personToken, signInSession } from '../../db/schema/firm'
 import type { FirmContext } from '../firm-context'
 import { inTurn } from './password-work'
 import type { PasswordHashing } from './sign-in'
@@ -32,6 +32,7 @@ export async function invitePerson(ctx: FirmContext, input: { mutationId: string
   return ctx.once(input.mutationId, 'invite-person', input, async (tx) => {
     const [taken] = await tx.execute<{ person_id: string }>(sql`select person_id from find_person_by_email(${input.email})`).then(result => result.rows)
     if (taken) throw problem('check-answers', 'Somebody already signs in with that e-mail address.', { fields: { email: 'Somebody already signs in with this address' } })
+    if (input.crewId && !(await tx.select({ id: crew.id }).from(crew).where(and(eq(crew.firmId, ctx.firmId), eq(crew.id, input.crewId)))).length) throw problem('check-answers', 'Choose one of the firm\'s crews.', { fields: { crewId: 'Choose a crew' } })
     const id = uuidv7()
     await tx.insert(person).values({ firmId: ctx.firmId, id, name: input.name, email: input.email })
     await tx.insert(membership).values({ firmId: ctx.firmId, personId: id, roles: input.roles, crewId: input.crewId ?? null })
