@@ -1,6 +1,7 @@
 /** Every kind of mutation and what applies it. A kind without an entry here stops the start of the tests. */
 import { MUTATION_KINDS } from '../../shared/job/mutations'
 import { answerQuery } from './answer-query'
+import { finishSurvey } from './finish-survey'
 import { changeCustomer, changeJob, changePremises } from './change-columns'
 import { changePart, removePart } from './change-part'
 import type { Apply } from './mutation'
@@ -16,6 +17,7 @@ const special: Record<string, Apply<never>> = {
   'keep-photograph': keepPhotograph,
   'remove-photograph': removePhotograph,
   'answer-query': answerQuery,
+  'finish-survey': finishSurvey,
 }
 
 /** What applies a kind, or undefined where nothing does. */

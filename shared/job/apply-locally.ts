@@ -3,6 +3,7 @@ import type { JobRecord, PartRow, ReadingRow } from '../types/record'
 import { mergeFields } from './merge-fields'
 import { MUTATION_KINDS, type Mutation, type PartChange, type ReadingPayload } from './mutations'
 import type { Part } from './parts'
+import { stageAfter } from './stages'
 
 /** What the kinds that are not parts carry, in one shape; each reads only its own. */
 interface LocalPayload { fields: object, id: string, readingId: string, claim: string, sha256: string, takenAt: string, answer: string }
@@ -21,6 +22,7 @@ export function applyLocally(record: JobRecord, mutation: Mutation, personId: st
     case 'confirm-reading': return { ...record, readings: record.readings.map(r => (r.id === payload.readingId ? { ...r, confirmedAt: mutation.at } : r)) }
     case 'keep-photograph': return { ...record, photographs: [...record.photographs.filter(p => p.id !== payload.id), { id: payload.id, claim: payload.claim, sha256: payload.sha256, thumbSha256: null, takenAt: payload.takenAt, personId, serverAt: mutation.at }] }
     case 'remove-photograph': return { ...record, photographs: record.photographs.filter(p => p.id !== payload.id) }
+    case 'finish-survey': return { ...record, job: { ...record.job, stage: stageAfter(record.job.stage, 'survey-answered') ?? record.job.stage } }
     case 'answer-query': return { ...record, queries: record.queries.map(q => (q.id === payload.id ? { ...q, answer: payload.answer, answeredBy: personId, answeredAt: mutation.at } : q)) }
     default: return record
   }

@@ -25,10 +25,10 @@ export function nearDay(day: Day, today: Day): string {
   return day.slice(0, 4) === today.slice(0, 4) ? formatDay(day).replace(/ \d{4}$/, '') : formatDay(day)
 }
 
-/** The next visit in words; one that lies behind says so. */
+/** The next visit in words; one that lies behind and is not marked done says so. */
 export function nextWords({ nextDay }: Pick<Line, 'nextDay'>, today: Day): string {
   if (!nextDay) return ''
-  return compareDays(nextDay, today) < 0 ? `${nearDay(nextDay, today)}, not marked done` : nearDay(nextDay, today)
+  return compareDays(nextDay, today) < 0 ? `was ${nearDay(nextDay, today)}` : nearDay(nextDay, today)
 }
 
 export const changedWords = ({ changedAt }: Pick<Line, 'changedAt'>, today: Day): string => nearDay(londonDay(isoOf(changedAt)), today)

@@ -73,6 +73,7 @@ export const MUTATION_KINDS: Record<string, MutationKind> = {
   'confirm-reading': { may: 'take-readings', isWork: true, payload: z.strictObject({ readingId: id }) },
   'keep-photograph': { may: 'take-photographs', isWork: false, payload: z.strictObject({ id, claim: z.string().min(1).max(60), sha256: z.string().regex(/^[0-9a-f]{64}$/), takenAt: z.iso.datetime() }) },
   'remove-photograph': { may: 'take-photographs', isWork: false, payload: z.strictObject({ id }) },
+  'finish-survey': { may: 'answer-survey', isWork: true, payload: z.strictObject({}) },
   'answer-query': { may: 'record-work', isWork: true, payload: z.strictObject({ id, answer: z.string().trim().min(1, 'Write an answer').max(2000) }) },
 }
 
