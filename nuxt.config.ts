@@ -29,6 +29,8 @@ export default defineNuxtConfig({
     tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } },
     nodeTsConfig: { include: ['../*.config.ts', '../scripts/**/*.ts', '../tests/**/*.ts'], compilerOptions: { paths: { '#server/*': ['../server/*'], '#shared/*': ['../shared/*'], '~/*': ['../app/*'] } } },
   },
+  // Fonts stay files of their own: the page's policy loads none that is written into a style sheet.
+  vite: { build: { assetsInlineLimit: 0 } },
   nitro: {
     compressPublicAssets: { gzip: true, brotli: true },
     esbuild: { options: { target: 'es2022' } },

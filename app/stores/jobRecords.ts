@@ -23,13 +23,15 @@ export const useJobRecords = defineStore('jobRecords', () => {
   const keptAt = ref<string | null>(null)
   const sentAt = ref<string | null>(null)
   const isOffline = ref(false)
+  const signInAgain = useSignInAgain()
+  // Asked for here: after an await the framework no longer knows whose request it is.
+  const { me } = useMe()
   let sending: Promise<void> | null = null
 
   const put = (record: JobRecord) => records.value = { ...records.value, [record.job.id]: record }
 
   async function load(jobId: string): Promise<JobRecord> {
     const fresh = await callApi<JobRecord>(`/api/jobs/${jobId}/record`)
-    const { me } = useMe()
     // What has not been sent yet stays on top of what the server knows.
     put(waiting.value.filter(m => m.jobId === jobId).reduce((record, m) => applyLocally(record, m, me.value?.id ?? ''), fresh))
     return records.value[jobId]!
@@ -42,7 +44,6 @@ export const useJobRecords = defineStore('jobRecords', () => {
 
   /** Applies the change here and sends it; resolves once the server has answered for it. */
   async function mutate(jobId: string, kind: string, payload: Record<string, unknown>): Promise<void> {
-    const { me } = useMe()
     const record = records.value[jobId]
     if (!record) return
     const mutation: Mutation = { id: uuidv7(), kind, jobId, baseVersion: baseVersionOf(jobId, kind, payload), at: new Date().toISOString(), payload }
@@ -71,7 +72,7 @@ export const useJobRecords = defineStore('jobRecords', () => {
       catch (error) {
         const { code } = readProblem(error)
         isOffline.value = code === 'try-later'
-        if (code === 'not-signed-in') useSignInAgain().value = true
+        if (code === 'not-signed-in') signInAgain.value = true
         if (import.meta.client) setTimeout(send, RETRY_MS)
         return
       }

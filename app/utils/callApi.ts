@@ -24,6 +24,6 @@ export function readProblem(error: unknown): Problem {
   const { data, statusCode } = error as { data?: { data?: Problem } & Partial<Problem>, statusCode?: number }
   const problem = data?.data ?? data
   if (problem?.code && problem.message) return problem as Problem
-  if (statusCode === undefined) return { code: 'try-later', message: 'There is no connection to the server just now. What you entered is still here.' }
+  if (statusCode === undefined && (error as Error).name === 'FetchError') return { code: 'try-later', message: 'There is no connection to the server just now. What you entered is still here.' }
   return { code: 'try-later', message: 'Something went wrong on the server. What you entered is still here: try again in a moment.' }
 }
