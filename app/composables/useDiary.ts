@@ -15,8 +15,8 @@ export function mondayOf(day: Day): Day {
 
 /** Two weeks of the diary and what is in hand: picking up, putting down, taking back. Nothing here navigates or asks twice. */
 export async function useDiary(today: Day, from: Ref<Day>) {
-  const { answer: diary, problem, isAsking, again } = await useAnswer('diary', () => callApi<Diary>('/api/diary', { query: { from: from.value, days: 14 } }), [from])
   const { act, isBusy, problem: refusal, forget } = useAct()
+  const { answer: diary, problem, isAsking, again } = await useAnswer('diary', () => callApi<Diary>('/api/diary', { query: { from: from.value, days: 14 } }), [from])
   const days = computed(() => workingDaysFrom(from.value, 10, 'England').filter(day => day < addDays(from.value, 14)))
   const tray = ref<InHand[]>([])
   const hand = computed(() => tray.value[0] ?? null)

@@ -41,7 +41,7 @@ describe('what speaks against a place in the diary', () => {
 
 describe('a line of the jobs list', () => {
   it.each([['on-site', 'sent-back', 'On site, sent back'], ['quoted', null, 'Quoted'], ['enquiry', 'cancelled', 'Cancelled'], ['surveyed', 'waiting', 'Surveyed, waiting']] as const)('%s and %s', (stage, sideState, words) => expect(stateWords({ stage, sideState })).toBe(words))
-  it.each([['2026-12-01', 'today'], ['2026-12-02', 'tomorrow'], ['2026-12-08', 'Tue 8 Dec'], ['2027-01-05', 'Tue 5 Jan 2027'], ['2026-11-30', 'yesterday, not marked done'], [null, '']])('next visit on %s', (nextDay, words) => expect(nextWords({ nextDay }, TODAY)).toBe(words))
+  it.each([['2026-12-01', 'today'], ['2026-12-02', 'tomorrow'], ['2026-12-08', 'Tue 8 Dec'], ['2027-01-05', 'Tue 5 Jan 2027'], ['2026-11-30', 'was yesterday'], [null, '']])('next visit on %s', (nextDay, words) => expect(nextWords({ nextDay }, TODAY)).toBe(words))
   it.each([['2026-12-01 09:30:00.123456+00', 'today'], ['2026-11-30 23:59:00+00', 'yesterday'], ['2026-06-30 23:30:00+00', 'Wed 1 Jul']])('changed at %s', (changedAt, words) => expect(changedWords({ changedAt }, TODAY)).toBe(words))
 })
 
