@@ -1,5 +1,5 @@
 import { findCustomerLink } from '#server/services/links/customer-links'
-import { isDoorOpen } from '#server/utils/pack-door-cookie'
+import { isDoorOpen } from '#server/services/links/open-door'
 import { readPack } from '#server/services/links/read-pack'
 
 export default defineOpenHandler({}, async ({ event }) => {

@@ -1,5 +1,5 @@
 import { findCustomerLink, readByLink } from '#server/services/links/customer-links'
-import { assertDoorOpen } from '#server/utils/pack-door-cookie'
+import { assertDoorOpen } from '#server/services/links/open-door'
 import { findMadePaper, readMadeFile } from '#server/services/links/read-made-paper'
 import { findStandingCertificate } from '#server/services/links/read-pack'
 

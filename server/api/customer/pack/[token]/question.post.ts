@@ -1,6 +1,6 @@
 import { askForm } from '#shared/schemas/customer'
 import { findCustomerLink } from '#server/services/links/customer-links'
-import { assertDoorOpen } from '#server/utils/pack-door-cookie'
+import { assertDoorOpen } from '#server/services/links/open-door'
 import { askFirm } from '#server/services/quotes/customer-acts'
 
 export default defineOpenHandler({ body: askForm }, async ({ event, body }) => {
