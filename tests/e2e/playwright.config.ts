@@ -6,6 +6,7 @@ if (!server) throw new Error('Browser tests need a running build: start `node sc
 
 export default defineConfig({
   testDir: '.',
+  tsconfig: './tsconfig.json',
   testMatch: '**/*.spec.ts',
   outputDir: '../../test-results',
   // One served build and one database for all: the journeys go one after another.
