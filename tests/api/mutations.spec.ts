@@ -48,7 +48,7 @@ describe('a change over HTTP', () => {
     const once = change('change-leg', { key: 'parallel', fields: { L_m: 7 } })
     const all = await Promise.all(Array.from({ length: 5 }, () => outcomesOf(installer, [once])))
     expect(all.map(([outcome]) => outcome!.status).sort()).toEqual(['applied', 'repeated', 'repeated', 'repeated', 'repeated'])
-    expect(new Set(all.map(([outcome]) => JSON.stringify({ ...outcome, status: '' }))).size).toBe(1)
+    for (const [outcome] of all) expect({ ...outcome, status: '' }).toEqual({ ...all[0]![0], status: '' })
     expect(await leg(office, 'parallel')).toMatchObject({ version: 1, content: { L_m: 7 } })
   })
 
@@ -88,7 +88,7 @@ describe('a batch', () => {
 
   it.each([
     ['nothing in it', { items: [] }, 'items'],
-    ['a misspelt key', { items: [], extra: 1 }, ''],
+    ['a misspelt key', { items: [], extra: 1 }, 'form'],
     ['an id that is none', { items: [{ id: 'one', kind: 'change-survey', jobId: randomUUID(), baseVersion: null, at: '2027-03-02T11:00:00.000Z', payload: {} }] }, 'items.0.id'],
     ['no job', { items: [{ id: randomUUID(), kind: 'change-survey', baseVersion: null, at: '2027-03-02T11:00:00.000Z', payload: {} }] }, 'items.0.jobId'],
   ])('with %s is refused and says at which field', async (_, body, field) => {

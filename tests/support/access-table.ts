@@ -16,6 +16,8 @@ export interface AccessRow {
   query?: string
   /** What an id that is not there gets, by parameter, where that is not 404. */
   missing?: Record<string, number>
+  /** What nobody in particular gets, where that differs. */
+  nobody?: number
   /** Calling it ends the session, so that a test of sessions calls it. */
   endsSession?: boolean
 }
@@ -43,12 +45,16 @@ const LINKS: Record<string, AccessRow> = {
   'POST /api/customer/pack/[token]/question': anyone(404, { body: () => ({ ...act(), question: 'Why?' }) }),
   'POST /api/customer/pack/[token]/fresh': anyone(200, { body: act }),
   'POST /c/pack/[token]/open': anyone(404),
+  'GET /api/customer/photographs/[token]': anyone(404),
+  'POST /api/customer/photographs/[token]/[claim]': anyone(404),
+  'GET /api/customer/visit/[token]': anyone(404),
+  'POST /api/customer/visit/[token]/question': anyone(404, { body: () => ({ ...act(), question: 'When?' }) }),
   'GET /api/customer/paid/[page]': anyone(200),
 }
 
 const OPEN: Record<string, AccessRow> = {
   'GET /api/health': anyone(200),
-  'GET /api/me': anyone(200),
+  'GET /api/me': anyone(200, { nobody: 204 }),
   'POST /api/auth/sign-in': anyone(422),
   'POST /api/auth/forgotten': anyone(422),
   'POST /api/auth/new-password': anyone(422),
@@ -98,7 +104,7 @@ const MONEY: Record<string, AccessRow> = {
 
 const FIRM: Record<string, AccessRow> = {
   'POST /api/auth/sign-out': writes(ALL, undefined, { endsSession: true }),
-  'POST /api/calculations/[name]': writes(ALL),
+  'POST /api/calculations/[name]': writes(ALL, undefined, { answers: 200 }),
   'GET /api/instruments': reads(ALL),
   'POST /api/instruments': writes('OSP'),
   'PATCH /api/instruments/[instrumentId]': writes('OSP', () => ({ ...act(), active: true })),
@@ -115,7 +121,7 @@ const FIRM: Record<string, AccessRow> = {
 export const ACCESS: Record<string, AccessRow> = { ...OPEN, ...LINKS, ...JOBS, ...MONEY, ...FIRM }
 
 /** Parameters that name no row of a firm's. */
-export const NO_ROW = new Set(['name', 'token', 'page'])
+export const NO_ROW = new Set(['name', 'token', 'page', 'claim'])
 
 /** Whether a letter of the row lets the role in, on a job of its crew's or on another. */
 export function lets(row: AccessRow, role: string, isOwn: boolean): boolean {
