@@ -24,12 +24,14 @@ export function useTestsSheet(page: TestSpec['page'], lockOfPage: () => string |
     const usual = Object.fromEntries(uses.value.map(use => [use, usualInstrument(record.value!, use, noon.value)]).filter(([, id]) => id !== undefined))
     return { ...usual, ...picked.value }
   })
-  const lock = computed(() => {
+  /** Why this person can only read here; then no row offers anything. */
+  const readOnly = computed(() => {
     if (!record.value) return 'The job is being fetched.'
     if (!mayChangeWork(record.value.job.stage)) return 'This work has been signed. A supervisor can send it back.'
     if (!job.may('take-readings') && !job.may('transcribe-readings')) return 'You can read this; readings are taken by those on the job\'s visits.'
-    return lockOfPage() ?? null
+    return null
   })
+  const lock = computed(() => readOnly.value ?? lockOfPage() ?? null)
 
   const instrumentOf = (use: InstrumentFunction | null) => use === null ? null : record.value?.instruments.find(each => each.id === chosen.value[use]) ?? null
 
@@ -77,5 +79,5 @@ export function useTestsSheet(page: TestSpec['page'], lockOfPage: () => string |
   }
   const confirm = (readingId: string) => job.mutate('confirm-reading', { readingId })
 
-  return { job, me, rows, uses, chosen, noon, lock, contexts, setContext, whyNot, choose, keepFigure, keepSeen, judge, confirm, instrumentOf }
+  return { job, me, rows, uses, chosen, noon, lock, readOnly, contexts, setContext, whyNot, choose, keepFigure, keepSeen, judge, confirm, instrumentOf }
 }
