@@ -7,6 +7,7 @@ import type * as z from 'zod'
 import { mayDo, reachOf, whoMay, type Act } from '../../shared/job/permissions'
 import { fieldProblems } from '../../shared/utils/field-problems'
 import { problem, ProblemError, PROBLEM_STATUS } from '../../shared/utils/problem'
+import { isDatabaseAway } from '../db/database-away'
 import { findJob, type LockedJob } from '../db/queries/jobs'
 import type { FirmContext } from '../services/firm-context'
 
@@ -93,10 +94,4 @@ async function answering<T>(event: H3Event, act: () => Promise<T>): Promise<T> {
     if (isDatabaseAway(error)) throw createError({ statusCode: 503, statusMessage: 'try-later', message: 'Try again in a moment.', data: { code: 'try-later', message: 'The server cannot reach its records just now. What you entered is still here: try again in a moment.' } })
     throw error
   }
-}
-
-const AWAY = new Set(['ECONNREFUSED', 'ECONNRESET', '57P01', '57P02', '57P03', '53300'])
-function isDatabaseAway(error: unknown): boolean {
-  const { code, message, cause } = error as { code?: string, message?: string, cause?: unknown }
-  return (code !== undefined && AWAY.has(code)) || /timeout exceeded when trying to connect|Connection terminated/.test(message ?? '') || (cause !== undefined && isDatabaseAway(cause))
 }

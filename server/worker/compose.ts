@@ -13,6 +13,7 @@ import { quoteSentMessage } from '../messages/quote-sent'
 import { sentBackMessage } from '../messages/sent-back'
 import { visitConfirmedMessage } from '../messages/visit-confirmed'
 import { makeCustomerLink } from '../services/links/customer-links'
+import { customerNoteMessage } from '../services/links/tell-firm'
 import { makePersonToken } from '../services/people/tokens'
 import { config } from '../utils/config'
 
@@ -23,6 +24,7 @@ export type NeedsLink
 
 // Each builder takes what its services put into the outbox, plus `from` and `url`; the row is data, so its shape is theirs to keep.
 const BUILDERS: Record<string, (input: never) => Message> = {
+  'customer-note': customerNoteMessage,
   'deposit-received': depositReceivedMessage,
   'invitation': invitationMessage,
   'notice-cover': noticeCoverMessage,
@@ -45,7 +47,8 @@ export async function composeOutboxMessage(tx: FirmTx, row: { firmId: string, jo
   const build = BUILDERS[row.message]
   if (!build) throw new Error(`Nobody writes the message "${row.message}"`)
   const { needsLink, ...content } = row.content as { needsLink?: NeedsLink } & Record<string, unknown>
-  const url = needsLink ? await linkOf(tx, row, needsLink) : content.url
+  // Our own pages are named by path, so that a message carries the address this server has now.
+  const url = needsLink ? await linkOf(tx, row, needsLink) : typeof content.path === 'string' ? `${config().baseUrl}${content.path}` : content.url
   return build({ ...content, url, from: await senderOf(tx, row.firmId) } as never)
 }
 

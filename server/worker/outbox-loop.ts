@@ -1,7 +1,8 @@
 /** Sends what is due: woken by the database when something is queued, and every few seconds anyhow. */
 import type pg from 'pg'
 import { workerPool } from '../db/pool'
-import { markUnclear, sendMessage } from './send-message'
+import { isDatabaseAway } from '../db/database-away'
+import { markUnclear, sendMessage, setAside } from './send-message'
 
 const LOOK_EVERY_MS = 4_000
 const AT_ONCE = 20
@@ -27,7 +28,7 @@ export function startOutboxLoop(): OutboxLoop {
     const { rows } = await workerPool().query<{ firm_id: string, id: string }>('select * from find_due_messages($1)', [AT_ONCE])
     for (const row of rows) {
       if (isStopped) break
-      await sendMessage(row.firm_id, row.id)
+      await sendMessage(row.firm_id, row.id).catch((error: Error) => isDatabaseAway(error) ? Promise.reject(error) : setAside(row.firm_id, row.id, error.message))
     }
     return rows.length
   }

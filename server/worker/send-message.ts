@@ -34,6 +34,14 @@ export async function sendMessage(firmId: string, id: string): Promise<void> {
   })
 }
 
+/** A message that cannot even be written is set aside where the office sees it, so that it holds up no other. */
+export async function setAside(firmId: string, id: string, why: string): Promise<void> {
+  await changeAsFirm(firmId, async (tx) => {
+    const [row] = await tx.update(outboxMessage).set({ state: 'failed', problem: why.slice(0, 300) }).where(and(eq(outboxMessage.firmId, firmId), eq(outboxMessage.id, id), eq(outboxMessage.state, 'queued'))).returning({ jobId: outboxMessage.jobId, message: outboxMessage.message })
+    if (row) await recordEvent(tx, { type: 'message-failed', jobId: row.jobId, detail: { messageId: id, message: row.message } })
+  })
+}
+
 async function claim(tx: FirmTx, firmId: string, id: string): Promise<Letter | null> {
   const [row] = await tx.update(outboxMessage).set({ state: 'claimed', claimedAt: sql`now()`, attempts: sql`${outboxMessage.attempts} + 1` }).where(and(eq(outboxMessage.firmId, firmId), eq(outboxMessage.id, id), eq(outboxMessage.state, 'queued'))).returning()
   if (!row) return null
