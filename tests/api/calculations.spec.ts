@@ -34,7 +34,6 @@ describe('a calculation over HTTP', () => {
   it.each([
     ['a wrong type', 'mounting', { lowest_m: 'high', kind: 'socket' }],
     ['a misspelt key', 'mounting', { lowest: 1, kind: 'socket' }],
-    ['nothing', 'mounting', {}],
     ['a name nobody knows', 'weather', {}],
     ['a name that every object has', 'constructor', {}],
   ])('refuses %s as the contract says', async (_, name, body) => {

@@ -1,4 +1,7 @@
-/** What every answer but a built file says of itself: no cache keeps it, no other site shows or reads it. Pages get their own policy with a nonce on top. */
+/**
+ * What every answer but a built file says of itself: no cache keeps it, no other site shows or reads it. Pages get their own policy with a nonce on top.
+ * Middleware runs in the order of file names: this one before those that refuse.
+ */
 import { defineEventHandler, setResponseHeaders } from 'h3'
 
 const DATA = /^\/(api|c)\//
