@@ -41,10 +41,13 @@ export async function touchJob(tx: FirmTx, firmId: string, jobId: string): Promi
   return row!.recordVersion
 }
 
+/** A revision's reason stands in the side note until its certificate is sealed. */
+const KEEPS_NOTE = new Set<StageEvent>(['revision-opened', 'capacities-signed', 'sent-back'])
+
 /** Moves the job where the event moves it; gives the stage it is in afterwards. */
 export async function moveJob(tx: FirmTx, firmId: string, locked: Pick<LockedJob, 'id' | 'stage'>, event: StageEvent, sideState: 'sent-back' | null = null): Promise<Stage> {
   const next = stageAfter(locked.stage, event)
   if (!next) return locked.stage
-  await tx.update(job).set({ stage: next, stageSince: sql`now()`, withWhom: STAGE_WORDS[next].withWhom, sideState, sideNote: '' }).where(and(eq(job.firmId, firmId), eq(job.id, locked.id)))
+  await tx.update(job).set({ stage: next, stageSince: sql`now()`, withWhom: STAGE_WORDS[next].withWhom, sideState, ...(KEEPS_NOTE.has(event) ? {} : { sideNote: '' }) }).where(and(eq(job.firmId, firmId), eq(job.id, locked.id)))
   return next
 }

@@ -4,6 +4,7 @@
  */
 import { contentOf, textOf } from '../../../shared/job/judge/facts'
 import { withoutBlanks } from '../../../shared/job/judge/judged'
+import { revisionLetters } from '../../../shared/job/certificate-name'
 import { ruleIdOf } from '../../../shared/job/rules/rule'
 import { notApplicable, notEntered, textField } from '../../../shared/schemas/sealed-record/field'
 import type { InstallationRecord } from '../../../shared/schemas/sealed-record/installation'
@@ -94,10 +95,4 @@ function earthingMethod(input: AssembleInput): InstallationRecord['earthingMetho
 
 function fullAddress({ address, town, postcode }: AssembleInput['record']['premises']): string {
   return [address.replace(/\s*\n\s*/g, ', ').trim(), [town, postcode].filter(Boolean).join(' ')].filter(Boolean).join(', ')
-}
-
-/** 0 -> A, 25 -> Z, 26 -> AA. */
-function revisionLetters(revision: number): string {
-  const last = String.fromCharCode(65 + revision % 26)
-  return revision < 26 ? last : revisionLetters(Math.floor(revision / 26) - 1) + last
 }
