@@ -4,10 +4,13 @@ import type { Judgement } from '../../../shared/job/judge/types'
 import type { JobRecord } from '../../../shared/types/record'
 import { addDays } from '../../../shared/utils/dates'
 import type { FirmTx } from '../../db/firm-db'
+import { problem } from '../../../shared/utils/problem'
 import { recordEvent } from '../../db/queries/events'
+import { lockJob, touchJob } from '../../db/queries/jobs'
 import { queuePaper } from '../../db/queries/papers'
 import { notice } from '../../db/schema/notice'
 import type { FirmContext } from '../firm-context'
+import { loadJudged } from '../sign-off/load-judged'
 
 /** Days after the work within which the network operator is told of a charger (rule DNO-02). */
 const TELL_AFTER_DAYS = 28
@@ -25,7 +28,21 @@ export async function prepareNotice(tx: FirmTx, ctx: FirmContext, record: JobRec
   }
 }
 
-async function prepare(tx: FirmTx, ctx: FirmContext, record: JobRecord, owed: { kind: string, recipient: string, route: string, reasons: string[], lastDay: string }): Promise<void> {
+/** Prepares the question or notice to the network operator before the work, where the route asks for one first. */
+export async function prepareNetworkNotice(ctx: FirmContext, jobId: string, input: { mutationId: string }): Promise<{ prepared: boolean }> {
+  return ctx.once(input.mutationId, 'prepare-notice', { jobId }, async (tx) => {
+    await lockJob(tx, ctx.firmId, jobId)
+    const { record, judgement, today } = await loadJudged(tx, ctx, jobId)
+    const route = judgement.route.answer
+    if (!route.result.route) throw problem('wrong-stage', 'The way to the network operator cannot be told yet: Supply says what is missing.', { reasons: judgement.route.waitsFor.map(ref => `Waits for ${ref.words}.`) })
+    const isAfter = route.result.route === 'tell-after'
+    await prepare(tx, ctx, record, { kind: 'network-operator', recipient: 'Network operator', route: route.result.route, reasons: route.reasons, lastDay: isAfter ? addDays(today, route.result.deadlineDays ?? TELL_AFTER_DAYS) : null })
+    await touchJob(tx, ctx.firmId, jobId)
+    return { prepared: true }
+  })
+}
+
+async function prepare(tx: FirmTx, ctx: FirmContext, record: JobRecord, owed: { kind: string, recipient: string, route: string, reasons: string[], lastDay: string | null }): Promise<void> {
   const [standing] = await tx.select({ id: notice.id }).from(notice).where(and(eq(notice.firmId, ctx.firmId), eq(notice.jobId, record.job.id), eq(notice.kind, owed.kind)))
   if (standing) return
   const id = uuidv7()
