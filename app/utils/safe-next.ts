@@ -3,7 +3,7 @@
  * another site by it.
  */
 export function safeNext(next: unknown): string {
-  if (typeof next !== 'string' || !next.startsWith('/') || /^\/[/\\]/.test(next) || /[\u0000-\u001F\\]/.test(next)) return '/'
+  if (typeof next !== 'string' || !next.startsWith('/') || next.startsWith('//') || [...next].some(sign => sign < ' ' || sign === '\\')) return '/'
   const here = 'https://here.invalid'
   const url = URL.canParse(next, here) ? new URL(next, here) : null
   // Dots in the path are resolved by now, and must not have left two strokes at its start.

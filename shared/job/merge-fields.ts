@@ -30,13 +30,9 @@ export function mergeFields(current: PartRow | null, change: FieldChange): Merge
   if (clashing.length) return { stale: true, fields: clashing, row: base }
 
   const version = base.version + 1
-  const content = { ...base.content }
   const stamps = { ...base.stamps }
-  for (const field of changed) {
-    const value = change.fields[field] ?? null
-    if (value === null) delete content[field]
-    else content[field] = value
-    stamps[field] = { v: version, by: change.by, at: change.at }
-  }
+  for (const field of changed) stamps[field] = { v: version, by: change.by, at: change.at }
+  // An emptied field leaves no value behind; its stamp stays, so that a late change to it is still seen as late.
+  const content = Object.fromEntries(Object.entries({ ...base.content, ...change.fields }).filter(([, value]) => value !== null && value !== undefined))
   return { stale: false, row: { key: base.key, position: change.position ?? base.position, content, stamps, version } }
 }

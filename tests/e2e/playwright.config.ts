@@ -13,10 +13,12 @@ export default defineConfig({
   workers: 1,
   forbidOnly: true,
   timeout: 60_000,
+  expect: { timeout: 10_000 },
   reporter: process.env.TEST_JSON_FILE ? [['list'], ['json', { outputFile: process.env.TEST_JSON_FILE }]] : [['list']],
   use: {
     baseURL: server.TEST_BASE_URL,
     locale: 'en-GB',
+    actionTimeout: 20_000,
     timezoneId: 'Europe/London',
     trace: 'retain-on-failure',
     screenshot: 'only-on-failure',

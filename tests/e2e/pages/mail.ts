@@ -18,7 +18,8 @@ export async function letterTo(to: string, subject: RegExp, within_s = 60): Prom
 }
 
 export async function attachmentOf(letter: Letter, at: number): Promise<Buffer> {
-  return Buffer.from(await fetch(`${address()}/messages/${letter.id}/attachments/${at}`).then(answer => answer.arrayBuffer()))
+  const bytes = await fetch(`${address()}/messages/${letter.id}/attachments/${at}`).then(answer => answer.arrayBuffer())
+  return Buffer.from(new Uint8Array(bytes))
 }
 
 /** The first link of our own in a letter. */
