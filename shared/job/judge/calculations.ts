@@ -47,7 +47,7 @@ export function judgeSupply(inputs: JobInputs, house: HouseDemand, demandWaitsFo
       ...(inputs.limitState !== 'none' && { loadLimit_A: inputs.loadLimit_A, limiterTested: inputs.limiterTested }),
     },
     from: {
-      fuse_A: survey('cutout_A', 'the main fuse\'s rating'), fuseKnown: survey('cutout_A', inputs.fuseKnown === 'assumed' ? 'the main fuse\'s rating, read or told: it is only assumed' : 'how the main fuse\'s rating is known'),
+      fuse_A: survey('cutout_A', 'the main fuse\'s rating'), fuseKnown: survey('cutout_A', numberOf(inputs.survey, 'cutout_A') === undefined ? 'the main fuse\'s rating' : inputs.fuseKnown === 'assumed' ? 'the main fuse\'s rating, read or told: it is only assumed' : 'how the main fuse\'s rating is known'),
       house_A: demandWaitsFor, ev_A: designedRef('Ib_A', 'the charger\'s current'), limiterTested: readingRef('limiter'),
     },
   })
