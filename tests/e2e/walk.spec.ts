@@ -202,7 +202,7 @@ test('the supervisor opens what is odd, countersigns, and the certificate is sea
   await open(page, '/countersign')
   await page.getByRole('link', { name: new RegExp(CUSTOMER.address) }).first().click()
   await page.waitForURL(/pairs/)
-  await expect(page.getByRole('heading', { name: 'Countersign' })).toBeVisible()
+  await expect(page.getByRole('button', { name: /^Open it/ }).first()).toBeVisible()
   for (let at = 0; at < 40; at++) {
     const next = page.getByRole('button', { name: /^(Open it|Accept)\b/ }).first()
     if (!await next.isVisible().catch(() => false)) break
@@ -211,6 +211,7 @@ test('the supervisor opens what is odd, countersigns, and the certificate is sea
   await page.locator('#countersign-declared').check()
   await page.getByLabel('Your name as it shall be printed').fill('Rhiannon Pryce')
   await page.getByRole('button', { name: 'Countersign', exact: true }).click()
+  await expect(page.getByText('Countersigned').first()).toBeVisible({ timeout: 20_000 })
   await go(page, 'leave')
   await expect(page.getByRole('heading', { name: 'Certificate' })).toBeVisible()
   await expect(page.getByText('In force')).toBeVisible()
