@@ -61,9 +61,11 @@ export async function countingProxy(databaseUrl) {
   return {
     url: url.href,
     async during(act) {
-      seen = { statements: [], waits: 0 }
+      const counted = seen = { statements: [], waits: 0 }
       await act()
-      return seen
+      // What comes afterwards belongs to nobody.
+      seen = { statements: [], waits: 0 }
+      return counted
     },
     close: () => server.close(),
   }
