@@ -84,6 +84,7 @@ const JOBS: Record<string, AccessRow> = {
   'GET /api/notices': reads(ALL),
   'POST /api/notices/[noticeId]/sent': writes(OFFICE, () => ({ ...act(), how: 'portal', sentOn: '2026-11-20', reference: '' })),
   'POST /api/notices/[noticeId]/reply': writes(OFFICE, () => ({ ...act(), outcome: 'question', repliedOn: '2026-11-21' })),
+  'POST /api/jobs/[jobId]/prepare-notice': writes(OFFICE),
   'POST /api/messages/[messageId]/send-again': writes(OFFICE, act),
 }
 
