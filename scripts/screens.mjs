@@ -53,11 +53,13 @@ const supervisor = await signedIn('Supervisor')
 await take(supervisor, 'pairs', `/jobs/${await firstJob(supervisor, 'ready-to-check')}/pairs`)
 
 const letters = await fetch(`${mail}/messages`).then(answer => answer.json()).catch(() => [])
-const pack = letters.find(letter => /certificate/i.test(letter.subject))
+const handedOver = []
+const { lines } = await office.request.get(`${base}/api/jobs?stage=handed-over`).then(answer => answer.json())
+for (const { id } of lines) handedOver.push(await office.request.get(`${base}/api/jobs/${id}/record`).then(answer => answer.json()))
+const pack = letters.find(letter => /certificate/i.test(letter.subject) && handedOver.some(({ customer }) => letter.to.includes(customer.email)))
 if (pack) {
   const { text } = await fetch(`${mail}/messages/${pack.id}`).then(answer => answer.json())
-  const sealed = await firstJob(office, 'handed-over')
-  const { premises } = await office.request.get(`${base}/api/jobs/${sealed}/record`).then(answer => answer.json())
+  const { premises } = handedOver.find(({ customer }) => pack.to.includes(customer.email))
   const customer = await (await browser.newContext({ viewport: PHONE, locale: 'en-GB' })).newPage()
   await customer.goto(/https?:\/\/\S+\/c\/pack\/\S+/.exec(text)[0], { waitUntil: 'networkidle' })
   await customer.getByLabel('Postcode').fill(premises.postcode)
