@@ -1,5 +1,6 @@
 /** The Run: the parts of a job in the order of the circuit, how far each is, and the facts that it shows once. */
 import type { JobRecord } from '../types/record'
+import { formatDay } from '../utils/dates'
 import { formatAmps, formatMetres, formatPercent } from '../utils/figures'
 import { mayEnergise, type LooseEnd } from './completeness'
 import { REQUIRED_FIELDS } from './completeness/required-fields'
@@ -135,7 +136,7 @@ export function officeMatters(record: JobRecord): OfficeMatter[] {
   return [
     at('Enquiry', 'enquiry', record.customer.name || 'no name yet'),
     at('Quote', 'quote', quote ? quote.state : 'none'),
-    at('Visits', 'visits', visit ? `next ${visit}` : record.visits.length ? 'none to come' : 'none'),
+    at('Visits', 'visits', visit ? `next ${formatDay(visit)}` : record.visits.length ? 'none to come' : 'none'),
     at('Notices', 'notices', record.notices.length === 0 ? 'none' : open ? `${open} to send` : 'sent'),
     at('Promises', 'promises', owed ? `${owed} open` : 'none open'),
   ]
