@@ -214,7 +214,7 @@ test('the supervisor opens what is odd, countersigns, and the certificate is sea
   await expect(page.getByText('Countersigned').first()).toBeVisible({ timeout: 20_000 })
   await go(page, 'leave')
   await expect(page.getByRole('heading', { name: 'Certificate' })).toBeVisible()
-  await expect(page.getByText('In force')).toBeVisible()
+  await expect(page.getByText('In force', { exact: true })).toBeVisible()
 })
 
 test('the pack goes by e-mail, opens for the customer, and proves itself', async ({ browser }) => {
@@ -228,6 +228,9 @@ test('the pack goes by e-mail, opens for the customer, and proves itself', async
   const text = execFileSync('pdftotext', ['-layout', file, '-'], { encoding: 'utf8' })
   for (const [key, shown] of READINGS) if (testSpec(key).answer === 'figure') expect(text, `${key} on paper`).toContain(shown.replace('>', ''))
   for (const sign of ['Ω', '≤', '≥', 'mm²']) expect(text).toContain(sign)
+  // The design's figures on paper are the engine's own.
+  const { result } = runCalculation(circuitCalculation, { Ib_A: 32, device: 'B', In_A: 40, phases: 1, cable: 'swa-90', terminals_C: 70, legs: [{ method: 'C', L_m: 18, ambient_C: 30 }], Ze_ohm: 0.21, cpc_mm2: 6, S_mm2: 6 }) as { result: { sizes: { percent: number, Zs_ohm: number }[] } }
+  for (const figure of [result.sizes[0]!.percent, result.sizes[0]!.Zs_ohm]) expect(text).toContain(figure.toPrecision(4))
   expect(text).toContain(CUSTOMER.address)
   expect(text).not.toContain(CUSTOMER.telephone)
 
