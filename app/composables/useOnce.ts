@@ -5,7 +5,7 @@ import type { Problem } from '#shared/utils/problem'
  * One act that must happen once: what goes on now, and what stopped it. Its id stays the same until the act succeeds,
  * so pressing again after a lost answer acts no second time.
  */
-export function useAct() {
+export function useOnce() {
   let mutationId: string | null = null
   const busy = ref<string | false>(false)
   const problem = ref<Problem | null>(null)
