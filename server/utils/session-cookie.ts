@@ -10,7 +10,8 @@ const unsealed = new Map<string, { secret: string, until: number }>()
 
 /** The secret in the request's cookie, or null. Only ids are sealed in it. */
 export async function sessionSecret(event: H3Event): Promise<string | null> {
-  const name = useRuntimeConfig(event).session.name as string
+  // Without the event: with it the whole configuration is read from the environment anew for every request.
+  const name = useRuntimeConfig().session.name as string
   const cookie = getCookie(event, name)
   if (!cookie) return null
   const key = createHash('sha256').update(cookie).digest('base64')
