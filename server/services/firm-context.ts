@@ -15,7 +15,18 @@ export interface FirmContext {
   once<T>(mutationId: string, kind: string, content: unknown, act: (tx: FirmTx) => Promise<T>): Promise<T>
 }
 
-export const contentHash = (content: unknown) => createHash('sha256').update(canonicalize(content) ?? '').digest('hex')
+/**
+ * SHA-256 of the content's RFC 8785 form, by which a repeat is told from another change under the same id.
+ * @throws check-answers where text holds half a sign (a lone surrogate), which that form refuses
+ */
+export function contentHash(content: unknown): string {
+  try {
+    return createHash('sha256').update(canonicalize(content) ?? '').digest('hex')
+  }
+  catch {
+    throw problem('check-answers', 'Some of the text holds a sign that cannot be kept. Type it again.')
+  }
+}
 
 export function firmContext(firmId: string, person: FirmContext['person']): FirmContext {
   return {
